@@ -1,0 +1,66 @@
+import { type Netlist, type Reading, type Take } from '@engine/netlist/types';
+import { TAKE_WORDS } from './takes';
+
+/** Where and how a reading is taken: what makes two readings replace each other. */
+export type Place = Pick<Reading, 'take' | 'at' | 'part'>;
+
+/**
+ * Names a place by one string, equal for two readings that replace each other.
+ *
+ * @param place kind of reading with its leads or its part.
+ * @returns a key such as `ohms part R1B` or `ac-volts at H3 CHASSIS`.
+ */
+export function placeKey(place: Place): string {
+  if (place.part) return `${place.take} part ${place.part}`;
+  return `${place.take} at ${(place.at ?? []).join(' ')}`;
+}
+
+/**
+ * Gives the label of a node as the drawing prints it, or the node's own name.
+ *
+ * @param netlist circuit with its points.
+ * @param node name of a node.
+ * @returns "V1 pin 4", or the name of the node when no point carries it.
+ */
+export function labelForNode(netlist: Pick<Netlist, 'points'>, node: string): string {
+  return netlist.points?.find((point) => point.node === node)?.label ?? node;
+}
+
+/**
+ * Says where a reading is taken, without its kind.
+ *
+ * @param netlist circuit with its points and its reference.
+ * @param place leads or part.
+ * @returns "across R1B", "in R1B" for amps, "at V1 pin 4", "from V1 pin 4 to V2 pin 3".
+ */
+export function labelForPlace(
+  netlist: Pick<Netlist, 'points' | 'reference'>,
+  place: Place,
+): string {
+  if (place.part) {
+    if (place.take === 'amps') return `through ${place.part}`;
+    return place.take === 'sign' || place.take === 'lifted-ohms'
+      ? `of ${place.part}`
+      : `across ${place.part}`;
+  }
+  const [red, black] = place.at ?? ['', ''];
+  if (black === netlist.reference) return `at ${labelForNode(netlist, red)}`;
+  return `from ${labelForNode(netlist, red)} to ${labelForNode(netlist, black)}`;
+}
+
+/**
+ * Names a reading in full for a sentence.
+ *
+ * @param netlist circuit with its points and its reference.
+ * @param place kind of reading with its leads or its part.
+ * @returns "ohms across R1B", "AC volts at V1 pin 4", "how DS1 looks".
+ */
+export function labelForReading(
+  netlist: Pick<Netlist, 'points' | 'reference'>,
+  place: Place,
+): string {
+  const take: Take = place.take;
+  if (take === 'sign') return `how ${place.part} looks`;
+  if (take === 'lifted-ohms') return `ohms of ${place.part} with one end lifted`;
+  return `${TAKE_WORDS[take].phrase} ${labelForPlace(netlist, place)}`;
+}
