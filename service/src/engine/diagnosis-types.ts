@@ -137,3 +137,23 @@ export interface DiagnosisResult {
   /** Hypotheses scored in full. */
   scored: number;
 }
+
+/** One place of the circuit: the healthy value beside the published and the measured one. */
+export interface ComparePoint {
+  kind: 'point' | 'part';
+  /** Take and place as one word; unique in the list. */
+  key: string;
+  label: string;
+  take: Take;
+  at?: [string, string];
+  part?: string;
+  /** Healthy value as the meter would show it; null for OL. */
+  value: number | null;
+  low: number | null;
+  high: number | null;
+  published?: number;
+  measured?: number | 'OL';
+  deviations?: number;
+  /** Place in walking order. */
+  order: number;
+}

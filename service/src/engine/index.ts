@@ -1,0 +1,21 @@
+/** The engine's only door: everything the service may use. */
+export { compare } from './compare';
+export { diagnose, diagnoseWith } from './diagnose';
+export type * from './diagnosis-types';
+export { closedForm, expectedWorking } from './expected';
+export type { ClosedForm, Working } from './expected';
+export * from './errors';
+export { applyAsFound } from './netlist/as-found';
+export { checkNetlist } from './netlist/checks';
+export { exportCsv, importCsv } from './netlist/csv';
+export { readNetlist } from './netlist/read';
+export { checkReading } from './netlist/readings';
+export { requireSound } from './netlist/require-sound';
+export type * from './netlist/types';
+export { FAULT_MODES, PART_KINDS, SEEN, TAKES } from './netlist/types';
+export { modesOf } from './faults/modes';
+export { checkRule, FACTS } from './rules';
+export type { Rule, RulesOutcome } from './rules';
+export { solve } from './solve';
+export { ENGINE_VERSION } from './tolerances';
+export { formatQuantity, parseQuantity } from './units';

@@ -1,0 +1,144 @@
+import { withDefaults } from '../netlist/defaults';
+import type { Netlist, Part } from '../netlist/types';
+import { SETTINGS } from '../tolerances';
+import { splitBlocks } from './blocks';
+
+/** Something that is not known exactly: a part's value, a cold ratio, the line voltage. */
+export interface Parameter {
+  /** Index of the part, −1 for one that the whole set shares. */
+  part: number;
+  what: 'value' | 'cold' | 'exponent' | 'line' | 'open';
+  /** Standard deviation of the relative deviation (of the exponent itself for `exponent`). */
+  sigma: number;
+}
+
+/** One end-to-end way for current: a part, or a leak from a heater to its cathode. */
+export interface Branch {
+  a: number;
+  b: number;
+  /** Index of the part it belongs to. */
+  part: number;
+  isLeak: boolean;
+}
+
+/** A checked netlist with nodes and parts as integers; made once and shared by all hypotheses. */
+export interface Circuit {
+  netlist: Netlist;
+  /** Parts with every default filled in. */
+  parts: Part[];
+  partIndex: Map<string, number>;
+  nodes: string[];
+  nodeIndex: Map<string, number>;
+  reference: number;
+  /** Node of the hot side, −1 without a line. */
+  hot: number;
+  return: number;
+  lineVolts: number;
+  hertz: number;
+  /** The first branches are the parts in order; leaks of heaters follow. */
+  branches: Branch[];
+  /** Branch of a heater's leak, −1 for none. */
+  leakOf: Int32Array;
+  /** True for branches solved as RMS values, false for those of a block with a rectifier or reactance. */
+  isSteady: Uint8Array;
+  parameters: Parameter[];
+  valueParameter: Int32Array;
+  coldParameter: Int32Array;
+  heaterExponent: number;
+  lampExponent: number;
+  lineParameter: number;
+  openParameter: number;
+}
+
+/** Relative standard deviation of a part's main value; ±t uniform gives t/√3. */
+export function valueSigma(part: Part): number {
+  switch (part.kind) {
+    case 'switch':
+    case 'fuse':
+    case 'joint':
+      return SETTINGS.contactSpread;
+    default:
+      return (part.tolerance ?? 0.1) / Math.sqrt(3);
+  }
+}
+
+/**
+ * Turns a checked netlist into integers and lists what is uncertain about it.
+ *
+ * @param netlist as found, free of problems that `checkNetlist` names.
+ * @param lineVolts RMS line voltage of the day; the design value when left out.
+ */
+export function compileCircuit(netlist: Netlist, lineVolts?: number): Circuit {
+  const parts = netlist.parts.map(withDefaults);
+  const nodes: string[] = [];
+  const nodeIndex = new Map<string, number>();
+  const indexOf = (node: string): number => {
+    let index = nodeIndex.get(node);
+    if (index === undefined) {
+      index = nodes.push(node) - 1;
+      nodeIndex.set(node, index);
+    }
+    return index;
+  };
+  const reference = indexOf(netlist.reference);
+  const { line } = netlist;
+  const hot = line ? indexOf(line.hot) : -1;
+  const back = line ? indexOf(line.return) : -1;
+  const branches: Branch[] = parts.map((part, index) => ({
+    a: indexOf(part.between[0]),
+    b: indexOf(part.between[1]),
+    part: index,
+    isLeak: false,
+  }));
+  const leakOf = new Int32Array(parts.length).fill(-1);
+  parts.forEach((part, index) => {
+    if (part.kind !== 'heater' || part.cathode === undefined) return;
+    leakOf[index] =
+      branches.push({
+        a: branches[index].a,
+        b: indexOf(part.cathode),
+        part: index,
+        isLeak: true,
+      }) - 1;
+  });
+
+  const parameters: Parameter[] = [];
+  const add = (parameter: Parameter): number => parameters.push(parameter) - 1;
+  const lineParameter = add({ part: -1, what: 'line', sigma: SETTINGS.lineSpread });
+  const openParameter = add({ part: -1, what: 'open', sigma: SETTINGS.openSpread });
+  const heaterExponent = add({ part: -1, what: 'exponent', sigma: SETTINGS.exponentSpread });
+  const lampExponent = add({ part: -1, what: 'exponent', sigma: SETTINGS.exponentSpread });
+  const valueParameter = new Int32Array(parts.length);
+  const coldParameter = new Int32Array(parts.length).fill(-1);
+  parts.forEach((part, index) => {
+    valueParameter[index] = add({ part: index, what: 'value', sigma: valueSigma(part) });
+    if (part.kind === 'heater' || part.kind === 'lamp') {
+      coldParameter[index] = add({ part: index, what: 'cold', sigma: SETTINGS.coldRatioSpread });
+    } else if (part.kind === 'thermistor') {
+      coldParameter[index] = add({ part: index, what: 'cold', sigma: valueSigma(part) });
+    }
+  });
+
+  return {
+    netlist,
+    parts,
+    partIndex: new Map(parts.map((part, index) => [part.ref, index])),
+    nodes,
+    nodeIndex,
+    reference,
+    hot,
+    return: back,
+    lineVolts: lineVolts ?? line?.volts ?? 0,
+    hertz: line?.hertz ?? 60,
+    branches,
+    leakOf,
+    isSteady: splitBlocks(parts, branches, nodes.length, hot, back, line?.ohms ?? 0),
+    parameters,
+    valueParameter,
+    coldParameter,
+    heaterExponent,
+    lampExponent,
+    lineParameter,
+    openParameter,
+  };
+}

@@ -1,0 +1,4 @@
+export type { BranchElement, ElementOf } from './elements';
+export { solveSteadyState, type SolveOptions } from './solve';
+export { SteadyState, type Extremes, type Waveform, type WarmStart } from './steady-state';
+export type { Moments } from './gram';

@@ -1,0 +1,227 @@
+/** Terms of the Taylor series; with a norm below 1/4 the rest is under 1e-14. */
+const TERMS = 10;
+const SMALL_NORM = 0.25;
+
+/**
+ * Exact solution of x' = A·x + B·(sin ωt, cos ωt, 1) over any length of time up to one step.
+ *
+ * The exponential of the longest step is made by scaling and squaring (C. Moler, C. Van Loan, SIAM
+ * Review 20 (1978) 801-836, method 3). The halves it passes on the way are kept: any shorter time is
+ * put together from them, and a Taylor series over what is left. Increments e^{At} − 1 are stored
+ * instead of e^{At}, so that a slow decay beside a fast one keeps its digits.
+ */
+export class Propagator {
+  private readonly halvings: number;
+  /** Per level: states×states increments. */
+  private readonly own: Float64Array[] = [];
+  /** Per level: states×3 answers to sine, cosine and one. */
+  private readonly driven: Float64Array[] = [];
+  private readonly turn: { sin: number; cos: number; length: number }[] = [];
+  private readonly scratch: Float64Array;
+  private readonly term: Float64Array;
+
+  /**
+   * @param a A, n×n by rows.
+   * @param b B, n×3 by rows.
+   * @param step longest length of time in seconds.
+   */
+  constructor(
+    readonly n: number,
+    readonly a: Float64Array,
+    readonly b: Float64Array,
+    private readonly omega: number,
+    readonly step: number,
+  ) {
+    let norm = 0;
+    for (let i = 0; i < n; i += 1) {
+      let sum = 0;
+      for (let j = 0; j < n; j += 1) sum += Math.abs(a[i * n + j]);
+      if (sum > norm) norm = sum;
+    }
+    const wanted = Math.ceil(Math.log2((norm * step) / SMALL_NORM));
+    this.halvings = Number.isFinite(wanted) ? Math.min(Math.max(wanted, 0), 60) : 0;
+    this.scratch = new Float64Array(n);
+    this.term = new Float64Array(n);
+    for (let level = 0; level <= this.halvings; level += 1) {
+      const length = step * 2 ** -level;
+      this.turn.push({ sin: Math.sin(omega * length), cos: Math.cos(omega * length), length });
+      this.own.push(new Float64Array(n * n));
+      this.driven.push(new Float64Array(n * 3));
+    }
+    this.series();
+    for (let level = this.halvings; level > 0; level -= 1) this.square(level);
+  }
+
+  /**
+   * Moves a state on in place.
+   *
+   * @param x state vector at the start, replaced by the one at the end.
+   * @param length seconds, at most one step.
+   * @param sin sin ωt at the start.
+   * @param cos cos ωt at the start.
+   */
+  advance(x: Float64Array, length: number, sin: number, cos: number): void {
+    if (length === this.step) {
+      this.apply(0, x, 0, sin, cos, 1);
+      return;
+    }
+    let left = length;
+    for (let level = 1; level <= this.halvings; level += 1) {
+      const turn = this.turn[level];
+      if (left < turn.length) continue;
+      this.apply(level, x, 0, sin, cos, 1);
+      const next = sin * turn.cos + cos * turn.sin;
+      cos = cos * turn.cos - sin * turn.sin;
+      sin = next;
+      left -= turn.length;
+    }
+    this.rest(x, 0, left, sin, cos, 1);
+  }
+
+  /** Moves a deviation on in place: the same without any drive. `at` is its place in `x`. */
+  carry(x: Float64Array, at: number, length: number): void {
+    if (length === this.step) {
+      this.apply(0, x, at, 0, 0, 0);
+      return;
+    }
+    let left = length;
+    for (let level = 1; level <= this.halvings; level += 1) {
+      if (left < this.turn[level].length) continue;
+      this.apply(level, x, at, 0, 0, 0);
+      left -= this.turn[level].length;
+    }
+    this.rest(x, at, left, 0, 0, 0);
+  }
+
+  private apply(
+    level: number,
+    x: Float64Array,
+    at: number,
+    sin: number,
+    cos: number,
+    one: number,
+  ): void {
+    const { n, scratch } = this;
+    const own = this.own[level];
+    const driven = this.driven[level];
+    for (let i = 0, p = 0; i < n; i += 1) {
+      let sum = driven[i * 3] * sin + driven[i * 3 + 1] * cos + driven[i * 3 + 2] * one;
+      for (let j = 0; j < n; j += 1, p += 1) sum += own[p] * x[at + j];
+      scratch[i] = sum;
+    }
+    for (let i = 0; i < n; i += 1) x[at + i] += scratch[i];
+  }
+
+  /** Taylor series over a length that is short against every time constant. */
+  private rest(
+    x: Float64Array,
+    at: number,
+    length: number,
+    sin: number,
+    cos: number,
+    one: number,
+  ): void {
+    if (length <= 0) return;
+    const { n, a, b, scratch, term, omega } = this;
+    for (let i = 0; i < n; i += 1) term[i] = x[at + i];
+    for (let k = 1; k <= TERMS; k += 1) {
+      const factor = length / k;
+      let largest = 0;
+      for (let i = 0, p = 0; i < n; i += 1) {
+        let sum = b[i * 3] * sin + b[i * 3 + 1] * cos + b[i * 3 + 2] * one;
+        for (let j = 0; j < n; j += 1, p += 1) sum += a[p] * term[j];
+        scratch[i] = sum * factor;
+      }
+      for (let i = 0; i < n; i += 1) {
+        term[i] = scratch[i];
+        x[at + i] += scratch[i];
+        largest = Math.max(largest, Math.abs(scratch[i]) - 1e-17 * Math.abs(x[at + i]));
+      }
+      if (largest <= 0) return;
+      // The drive's own derivatives, in the same scaled form.
+      const next = omega * cos * factor;
+      cos = -omega * sin * factor;
+      sin = next;
+      one = 0;
+    }
+  }
+
+  /** Fills the shortest level: Horner's scheme on the series of the driven system. */
+  private series(): void {
+    const { n, a, b, omega, halvings } = this;
+    const t = this.turn[halvings].length;
+    let x = new Float64Array(n * n);
+    let y = new Float64Array(n * 3);
+    let nextX = new Float64Array(n * n);
+    let nextY = new Float64Array(n * 3);
+    for (let i = 0; i < n; i += 1) x[i * n + i] = 1;
+    // Series of the drive's rotation, scaled alike: [[p, q], [−q, p]] on (sin, cos).
+    let p = 1;
+    let q = 0;
+    let one = 1;
+    for (let k = TERMS; k >= 1; k -= 1) {
+      const factor = t / k;
+      for (let i = 0; i < n; i += 1) {
+        for (let j = 0; j < n; j += 1) {
+          let sum = 0;
+          for (let m = 0; m < n; m += 1) sum += a[i * n + m] * x[m * n + j];
+          nextX[i * n + j] = sum * factor;
+        }
+        const bs = b[i * 3];
+        const bc = b[i * 3 + 1];
+        let toSin = bs * p - bc * q;
+        let toCos = bs * q + bc * p;
+        let toOne = b[i * 3 + 2] * one;
+        for (let m = 0; m < n; m += 1) {
+          toSin += a[i * n + m] * y[m * 3];
+          toCos += a[i * n + m] * y[m * 3 + 1];
+          toOne += a[i * n + m] * y[m * 3 + 2];
+        }
+        nextY[i * 3] = toSin * factor;
+        nextY[i * 3 + 1] = toCos * factor;
+        nextY[i * 3 + 2] = toOne * factor;
+      }
+      // The last pass leaves out the unit matrix: the increment is kept.
+      if (k > 1) for (let i = 0; i < n; i += 1) nextX[i * n + i] += 1;
+      const oldP = p;
+      p = 1 - omega * factor * q;
+      q = omega * factor * oldP;
+      one = 1;
+      [x, nextX] = [nextX, x];
+      [y, nextY] = [nextY, y];
+    }
+    this.own[halvings].set(x);
+    this.driven[halvings].set(y);
+  }
+
+  /** Fills the level above from this one: twice the length. */
+  private square(level: number): void {
+    const { n } = this;
+    const own = this.own[level];
+    const driven = this.driven[level];
+    const { sin, cos } = this.turn[level];
+    const ownTwice = this.own[level - 1];
+    const drivenTwice = this.driven[level - 1];
+    for (let i = 0; i < n; i += 1) {
+      for (let j = 0; j < n; j += 1) {
+        let sum = 2 * own[i * n + j];
+        for (let m = 0; m < n; m += 1) sum += own[i * n + m] * own[m * n + j];
+        ownTwice[i * n + j] = sum;
+      }
+      const d0 = driven[i * 3];
+      const d1 = driven[i * 3 + 1];
+      const d2 = driven[i * 3 + 2];
+      let toSin = d0 + d0 * cos - d1 * sin;
+      let toCos = d1 + d0 * sin + d1 * cos;
+      let toOne = d2 + d2;
+      for (let m = 0; m < n; m += 1) {
+        toSin += own[i * n + m] * driven[m * 3];
+        toCos += own[i * n + m] * driven[m * 3 + 1];
+        toOne += own[i * n + m] * driven[m * 3 + 2];
+      }
+      drivenTwice[i * 3] = toSin;
+      drivenTwice[i * 3 + 1] = toCos;
+      drivenTwice[i * 3 + 2] = toOne;
+    }
+  }
+}
