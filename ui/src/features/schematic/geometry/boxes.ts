@@ -72,3 +72,8 @@ export function textPlace(
   const shift = anchor === 'start' ? 0 : anchor === 'middle' ? width / 2 : width;
   return { box: { x: x - shift, y, width, height }, anchor };
 }
+
+/** True when any piece of a bent wire runs through the inside of a box. */
+export function doCrossAny(spots: readonly Spot[], box: Box): boolean {
+  return spots.slice(1).some((to, index) => doesCross(spots[index], to, box));
+}

@@ -16,7 +16,7 @@ import {
 import { type Sheet } from './spacing';
 
 const TAIL = 10;
-const INNER_GAP = NODE_LABEL_HEIGHT + 6;
+const INNER_GAP = NODE_LABEL_HEIGHT + 16;
 
 /** Height of a column from its first symbol to the end of its rail symbol, px. */
 export function columnHeight(column: Column): number {
@@ -61,7 +61,7 @@ export function drawColumn(
       spot: { x, y: y + INNER_GAP / 2 },
       label: textPlace(
         x + LABEL_GAP,
-        y + 3,
+        y + 8,
         nodeLabelWidth(sheet.netlist, node),
         NODE_LABEL_HEIGHT,
         'start',

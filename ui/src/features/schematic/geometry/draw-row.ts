@@ -93,7 +93,7 @@ export function drawRow(request: RowRequest): Row {
 
     const part = lane.parts[index];
     const gap = spacing.gaps[index] + stretch;
-    const centre = x + gap / 2;
+    const centre = x + spacing.centres[index] + stretch / 2;
     const turn = part.between[0] === node ? 0 : 2;
     sketch.parts.push(drawPart(part, centre, 0, turn));
     wire(sketch, node, x, 0, centre - SYMBOL_LENGTH / 2, 0);

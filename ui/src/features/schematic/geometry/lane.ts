@@ -77,6 +77,8 @@ export function laneOf(request: LaneRequest): Lane | null {
 function place(group: Part[], lane: Lane, path: Path, request: LaneRequest): boolean {
   const { rails, isString } = request;
   const byNode = partsByNode(group);
+  // A second winding with its rectifier leads in from the left; a winding alone hangs down.
+  const isFeeding = group.length > 1 && group.some((part) => part.kind === 'winding');
   const anchors = path.nodes.filter(
     (node, index) => byNode.has(node) && !isEndRail(index, path, rails),
   );
@@ -99,7 +101,7 @@ function place(group: Part[], lane: Lane, path: Path, request: LaneRequest): boo
       );
       return true;
     }
-    if (rails.has(last) || isString) {
+    if (isString || (rails.has(last) && !isFeeding)) {
       addColumn(lane.drops, from, chain.nodes[0], chain);
       return true;
     }
@@ -108,7 +110,6 @@ function place(group: Part[], lane: Lane, path: Path, request: LaneRequest): boo
   const at = path.nodes.indexOf(anchors[0]);
   const branch = laneOf({ parts: group, start: anchors[0], rails, isString: false });
   if (!branch || branch.parts.length === 0) return false;
-  const isFeeding = group.some((part) => part.kind === 'winding');
   lane.branches.push({ at, lane: branch, isFeeding });
   return true;
 }

@@ -14,6 +14,8 @@ export const LABEL_GAP = 10;
 export const CLEARANCE = 12;
 /** Room that a value such as "≈ 118.4 V" may need beside a node, px. */
 export const VALUE_WIDTH = 78;
+/** Room for a value at a node that is no point of the circuit, where values are rare, px. */
+const SIDE_VALUE_WIDTH = 54;
 /** Room that a suspect's badge may need, px. */
 export const BADGE_WIDTH = 66;
 /** Lines of a part's label: badge, designator, value. */
@@ -53,6 +55,8 @@ export function partLabelWidth(part: Part): number {
 
 /** Width kept for a node's label and values, px. */
 export function nodeLabelWidth(netlist: Pick<Netlist, 'points'>, node: string): number {
+  const isPoint = netlist.points?.some((point) => point.node === node);
+  if (!isPoint) return Math.max(SIDE_VALUE_WIDTH, textWidth(node));
   return Math.max(VALUE_WIDTH, textWidth(labelForNode(netlist, node)));
 }
 

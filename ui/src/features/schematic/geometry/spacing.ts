@@ -32,6 +32,8 @@ export interface LaneSpacing {
   zones: number[];
   /** From the end of each node's zone to the next node. */
   gaps: number[];
+  /** From the end of each node's zone to the centre of the part behind it. */
+  centres: number[];
 }
 
 const SOURCE_HALF = 18;
@@ -85,18 +87,24 @@ export function spaceLane(lane: Lane, sheet: Sheet): LaneSpacing {
     if (drop) return halfOf(drop.columns[0]);
     return nodeLabelWidth(sheet.netlist, lane.nodes[index]) / 2;
   };
-  const gaps = lane.parts.map((part, index) => {
+  const sides = lane.parts.map((part, index) => {
     const cathode = lane.cathodes.get(index);
     const spacing = cathodes.get(index);
+    const half = slotWidth(part) / 2;
     if (!cathode || !spacing) {
-      return Math.max(slotWidth(part), rightOf(index) + CLEARANCE + leftOf(index + 1));
+      const missing = rightOf(index) + CLEARANCE + leftOf(index + 1) - 2 * half;
+      return [half + Math.max(0, missing / 2), half + Math.max(0, missing / 2)];
     }
     const before = rightOf(index) + CLEARANCE + halfOf(cathode.columns[0]);
     const after = spacing.offsets.at(-1)! + spacing.reach + CLEARANCE + leftOf(index + 1);
-    return Math.max(slotWidth(part), 2 * before, 2 * after);
+    return [Math.max(half, before), Math.max(half, after)];
   });
+  const gaps = sides.map(([before, after]) => before + after);
   widenForPartners(lane, sheet, zones, gaps);
-  return { drops, cathodes, zones, gaps };
+  const centres = sides.map(
+    ([before, after], index) => before + (gaps[index] - before - after) / 2,
+  );
+  return { drops, cathodes, zones, gaps, centres };
 }
 
 /** Width of one part lying along a line with its label above and a lead on either side. */
