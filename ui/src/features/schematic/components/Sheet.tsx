@@ -28,6 +28,7 @@ const useStyles = makeStyles({
   flow: { flexGrow: 1, minHeight: 0, minWidth: 0 },
   foot: {
     display: 'flex',
+    flexWrap: 'wrap',
     alignItems: 'center',
     justifyContent: 'space-between',
     gap: tokens.spacingHorizontalM,

@@ -1,5 +1,5 @@
 import { type Netlist, type Part } from '@engine/netlist/types';
-import { otherEnd, partsByNode, railsOf, separate } from './graph';
+import { otherEnd, partsByNode, railsOf, separate } from '@/lib/bench/graph';
 
 /** A part of the circuit that is drawn as one figure. */
 export interface Block {

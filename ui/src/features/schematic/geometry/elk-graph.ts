@@ -3,7 +3,7 @@ import { type ElkExtendedEdge, type ElkNode } from 'elkjs/lib/elk-api';
 import { railSymbol, startFlag } from './draw-column';
 import { type Drawing, emptySketch, type Sketch, type Spot } from './drawing';
 import { finish } from './finish';
-import { otherEnd, partsByNode, railsOf } from './graph';
+import { otherEnd, partsByNode, railsOf } from '@/lib/bench/graph';
 import {
   drawPart,
   LABEL_GAP,

@@ -11,21 +11,21 @@ import {
 const MARGIN = 24;
 const OUTLINE = 5;
 
-/** Adds junction dots, outlines of bodies and the extent, with everything moved into the positive. */
+/** Adds junction dots, outlines of bodies and the extent. */
 export function finish(sketch: Sketch): Drawing {
-  const extent = grown(
-    unionOf([
-      ...sketch.parts.flatMap((part) => [part.box, part.label.box]),
-      ...sketch.nodes.map((node) => node.label.box),
-      ...sketch.rails.map((rail) => rail.box),
-      ...sketch.sources.flatMap((source) => [source.box, source.label.box]),
-      ...sketch.wires.flatMap((wire) =>
-        wire.spots.map((spot) => ({ ...spot, width: 0, height: 0 })),
-      ),
-    ]),
-    MARGIN,
-  );
+  const extent = grown(boundsOf(sketch), MARGIN);
   return { ...sketch, dots: dotsOf(sketch), assemblies: outlinesOf(sketch), extent };
+}
+
+/** Smallest box around everything of a sketch, labels included. */
+export function boundsOf(sketch: Sketch): Box {
+  return unionOf([
+    ...sketch.parts.flatMap((part) => [part.box, part.label.box]),
+    ...sketch.nodes.map((node) => node.label.box),
+    ...sketch.rails.map((rail) => rail.box),
+    ...sketch.sources.flatMap((source) => [source.box, source.label.box]),
+    ...sketch.wires.flatMap((wire) => wire.spots.map((spot) => ({ ...spot, width: 0, height: 0 }))),
+  ]);
 }
 
 /** Finds the spots where three or more ends of one node's wires meet. */

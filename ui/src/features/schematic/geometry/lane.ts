@@ -1,5 +1,5 @@
 import { type Part } from '@engine/netlist/types';
-import { otherEnd, partsByNode, separate } from './graph';
+import { otherEnd, partsByNode, separate } from '@/lib/bench/graph';
 import { type Path } from './main-path';
 import { mainPath } from './main-path';
 

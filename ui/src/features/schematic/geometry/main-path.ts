@@ -1,5 +1,5 @@
 import { type Part } from '@engine/netlist/types';
-import { otherEnd, partsByNode } from './graph';
+import { otherEnd, partsByNode } from '@/lib/bench/graph';
 
 /** A way through the circuit: one node more than parts. */
 export interface Path {

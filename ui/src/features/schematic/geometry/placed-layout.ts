@@ -4,7 +4,7 @@ import { railSymbol } from './draw-column';
 import { type DrawnPart, type Drawing, emptySketch, type Sketch, type Spot } from './drawing';
 import { finish } from './finish';
 import { addNodeLabels } from './free-labels';
-import { railsOf } from './graph';
+import { railsOf } from '@/lib/bench/graph';
 import { drawPart } from './metrics';
 
 const ROW_PITCH = 140;
