@@ -28,6 +28,21 @@ export const SETTINGS = {
   exponentSpread: 0.035,
   /** Closed contacts: their few hundredths of an ohm are known to a factor of about two. Assumption. */
   contactSpread: 0.5,
+  /** Series resistance of a sound capacitor: known to a factor of about two. Assumption. */
+  esrSpread: 0.5,
+  /** Series resistance and drop of a sound rectifier around the straight-line law. Assumptions. */
+  rectifierSpread: 0.25,
+  dropSpread: 0.25,
+  /** Unloaded volts of a secondary at the line voltage of the day. Assumption. */
+  windingSpread: 0.015,
+  /**
+   * What the straight-line rectifier law leaves out, as a share of a reading in a rectifier block,
+   * and in volts. Assumptions.
+   */
+  waveVagueness: 0.005,
+  waveFloorVolts: 0.002,
+  /** Volts of no meaning on a rail that has collapsed. Assumption. */
+  collapsedVolts: 0.004,
   /** Stray current into an unconnected lead from the wiring around it, amps RMS. Assumption. */
   strayAmps: 3e-7,
   /** Chance that a reading is a slip: wrong lug, wrong range. */

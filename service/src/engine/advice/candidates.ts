@@ -1,5 +1,5 @@
 import type { Reading, Take } from '../netlist/types';
-import type { Circuit } from '../solver/circuit';
+import type { Predictor } from '../solver/predictor';
 
 /** A reading that could be taken next. */
 export interface Candidate {
@@ -23,7 +23,10 @@ export function placeOf({ take, at, part }: Pick<Reading, 'take' | 'at' | 'part'
  *
  * @param taken places already read, by `placeOf`.
  */
-export function listCandidates(circuit: Circuit, taken: ReadonlySet<string>): Candidate[] {
+export function listCandidates(
+  { circuit, waves }: Pick<Predictor, 'circuit' | 'waves'>,
+  taken: ReadonlySet<string>,
+): Candidate[] {
   const { netlist, parts, reference, hot } = circuit;
   const black = circuit.nodes[reference];
   const out: Candidate[] = [];
@@ -42,6 +45,9 @@ export function listCandidates(circuit: Circuit, taken: ReadonlySet<string>): Ca
     if (index === undefined || index === reference || index === hot) continue;
     if (isPowered && steady.has(index)) {
       add({ take: 'ac-volts', at: [node, black], minutes: MINUTES.point });
+    } else if (waves?.network.rowOf(index) !== -1) {
+      add({ take: 'dc-volts', at: [node, black], minutes: MINUTES.point });
+      add({ take: 'ripple-volts', at: [node, black], minutes: MINUTES.ripple });
     }
     add({ take: 'ohms', at: [node, black], minutes: MINUTES.cold });
   }
@@ -50,6 +56,8 @@ export function listCandidates(circuit: Circuit, taken: ReadonlySet<string>): Ca
     if (isPowered && circuit.isSteady[k]) {
       add({ take: 'ac-volts', part: ref, minutes: MINUTES.across });
       if (part.kind === 'lamp') add({ take: 'sign', part: ref, minutes: 0.2 });
+    } else if (!circuit.isSteady[k] && !['winding', 'load'].includes(part.kind)) {
+      add({ take: 'dc-volts', part: ref, minutes: MINUTES.across });
     }
     add({ take: 'ohms', part: ref, minutes: MINUTES.cold });
     const isTube = part.kind === 'heater';

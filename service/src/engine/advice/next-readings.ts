@@ -85,7 +85,7 @@ export function rateCandidates(
 ): { candidates: RatedCandidate[]; suspects: Ranked[] } {
   const { circuit, readings } = scorer;
   const taken = new Set(readings.map((reading: Reading) => placeOf(reading)));
-  const listed = listCandidates(circuit, taken).filter(({ take }) => take !== 'sign');
+  const listed = listCandidates(scorer.predictor, taken).filter(({ take }) => take !== 'sign');
   const suspects = ranked
     .slice(0, MOST_SUSPECTS)
     .filter(({ probability }) => probability > LEAST_PROBABILITY);

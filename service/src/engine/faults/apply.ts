@@ -54,7 +54,10 @@ function writeFault(
       return;
     case 'high':
     case 'low':
-      if (part.kind === 'capacitor') return;
+      if (part.kind === 'capacitor') {
+        values.p0[k] *= fault.value!;
+        return;
+      }
       scaleOhms(values, k, fault.value!);
       values.scaledBy[k] = slot;
       return;
@@ -75,18 +78,34 @@ function writeFault(
       return;
     }
     case 'leaky':
+      values.p2[k] = fault.value!;
       values.cold[k] = 1 / fault.value!;
       values.state[k] = 3;
       values.scaledBy[k] = slot;
       return;
-    case 'shorted-turns':
-      values.cold[k] /= fault.value!;
-      values.p0[k] /= fault.value!;
+    case 'high-esr':
+      values.p1[k] *= fault.value!;
+      return;
+    case 'weak':
+      values.p0[k] *= fault.value!;
+      values.p1[k] *= fault.value!;
+      return;
+    case 'overload':
+      values.p0[k] *= fault.value!;
+      return;
+    case 'no-load':
+      setOpen(values, k);
+      values.cold[k] = 0;
+      return;
+    case 'shorted-turns': {
+      const factor = fault.value!;
+      // Ohms and volts shrink with the turns; a choke's inductance falls much further.
+      values.p0[k] *= part.kind === 'choke' ? Math.max(0.05, 0.5 * factor * factor) : factor;
+      values.p1[k] *= factor;
+      values.cold[k] /= factor;
       values.scaledBy[k] = slot;
       return;
-    default:
-      // weak, high-esr, overload and no-load show only in the waveform blocks.
-      return;
+    }
   }
 }
 

@@ -39,7 +39,7 @@ export function overChance(mean: number, spread: number, overOhms: number): numb
 
 /** Variance of the meter on one reading, in the units of `mean`. */
 export function meterVariance(spec: ReadingSpec, shown: number): number {
-  const sigma = spec.meter.sigma(shown);
+  const sigma = spec.meter.sigma(Math.abs(shown));
   const scaled = spec.isLog ? sigma / (shown + SETTINGS.ohmsOffset) : sigma;
   return scaled * scaled;
 }

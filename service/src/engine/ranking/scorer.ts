@@ -24,7 +24,11 @@ export function observationsOf(circuit: Circuit, readings: readonly Reading[]): 
     return {
       spec,
       isOver,
-      y: spec.isLog ? Math.log(Math.max(0, value) + SETTINGS.ohmsOffset) : Math.abs(value),
+      y: spec.isLog
+        ? Math.log(Math.max(0, value) + SETTINGS.ohmsOffset)
+        : spec.take === 'dc-volts'
+          ? value
+          : Math.abs(value),
       logWide: wideDensity(circuit, spec),
     };
   });
@@ -83,7 +87,7 @@ export class Scorer {
 
   /** Predicts any readings under a fault set; null when it does not settle. */
   predict(faults: readonly SettledFault[], specs: readonly ReadingSpec[]): Predictions | null {
-    return this.predictor.predict(applyFaults(this.healthy, this.circuit, faults), specs);
+    return this.predictor.predict(applyFaults(this.healthy, this.circuit, faults), specs, faults);
   }
 
   /**
@@ -95,7 +99,7 @@ export class Scorer {
     faults: readonly SettledFault[],
   ): { like: Likelihood; sigma: Float64Array } | null {
     const values = applyFaults(this.healthy, this.circuit, faults, this.values);
-    const predictions = this.predictor.predict(values, this.specs, this.predictions);
+    const predictions = this.predictor.predict(values, this.specs, faults, this.predictions);
     if (!predictions) return null;
     const like = this.likelihood.score(predictions, this.sigmasOf(faults));
     const n = this.observations.length;
@@ -108,7 +112,7 @@ export class Scorer {
   /** What the case's readings should be under a fault set, without spreads; false when it does not settle. */
   means(faults: readonly SettledFault[], mean: Float64Array): boolean {
     const values = applyFaults(this.healthy, this.circuit, faults, this.values);
-    return this.predictor.means(values, this.specs, mean);
+    return this.predictor.means(values, this.specs, faults, mean);
   }
 
   /** Log-likelihood of the case's readings under a fault set; null when it does not settle. */
@@ -117,7 +121,7 @@ export class Scorer {
     const known = this.memory.get(key);
     if (known !== undefined) return known;
     const values = applyFaults(this.healthy, this.circuit, faults, this.values);
-    const predictions = this.predictor.predict(values, this.specs, this.predictions);
+    const predictions = this.predictor.predict(values, this.specs, faults, this.predictions);
     let result: Likelihood | null = null;
     if (predictions) {
       result = this.likelihood.score(predictions, this.sigmasOf(faults));

@@ -1,6 +1,7 @@
 import { SETTINGS } from '../tolerances';
 import type { Circuit } from './circuit';
 import { Law } from './laws';
+import type { CapacitorPart } from '../netlist/types';
 
 /**
  * What every branch is under one hypothesis. Arrays have one entry per branch of the circuit; a
@@ -34,9 +35,36 @@ export function blankValues(n: number): BranchValues {
   };
 }
 
-/** Values of the healthy set. Branches of waveform kinds carry no current here. */
+/**
+ * Capacitance to expect: electrolytics are made from −20 % to +50 %, so their middle is 15 % above
+ * the marking (EIA practice, from memory).
+ */
+function expectedFarads(part: CapacitorPart): number {
+  return part.make === 'electrolytic' ? 1.15 * part.farads : part.farads;
+}
+
+function setWave(
+  values: BranchValues,
+  k: number,
+  law: Law,
+  p0: number,
+  p1: number,
+  p2: number,
+  cold: number,
+): void {
+  values.law[k] = law;
+  values.p0[k] = p0;
+  values.p1[k] = p1;
+  values.p2[k] = p2;
+  values.cold[k] = cold;
+}
+
+/** Values of the healthy set. */
 export function healthyValues(circuit: Circuit): BranchValues {
   const values = blankValues(circuit.branches.length);
+  const design = circuit.netlist.line?.volts ?? 0;
+  // A transformer's secondaries follow the line of the day.
+  const ratio = design > 0 ? circuit.lineVolts / design : 1;
   circuit.parts.forEach((part, k) => {
     switch (part.kind) {
       case 'heater':
@@ -55,12 +83,23 @@ export function healthyValues(circuit: Circuit): BranchValues {
       case 'switch':
       case 'fuse':
       case 'joint':
-      case 'choke':
-      case 'winding':
         setOhms(values, k, part.ohms!);
         break;
-      default:
-        // Capacitors, rectifiers and loads pass nothing an ohmmeter could see.
+      // Capacitors, rectifiers and loads pass nothing an ohmmeter could see.
+      case 'capacitor':
+        setWave(values, k, Law.Capacitor, expectedFarads(part), part.esr!, Infinity, 0);
+        break;
+      case 'rectifier':
+        setWave(values, k, Law.Rectifier, part.dropVolts!, part.ohms!, Infinity, 0);
+        break;
+      case 'choke':
+        setWave(values, k, Law.Choke, part.henries, part.ohms, 0, 1 / part.ohms);
+        break;
+      case 'winding':
+        setWave(values, k, Law.Winding, part.volts * ratio, part.ohms, part.phase!, 1 / part.ohms);
+        break;
+      case 'load':
+        setWave(values, k, Law.Load, part.amps, part.volts, part.exponent!, 0);
         break;
     }
   });

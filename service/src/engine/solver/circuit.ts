@@ -7,7 +7,7 @@ import { splitBlocks } from './blocks';
 export interface Parameter {
   /** Index of the part, −1 for one that the whole set shares. */
   part: number;
-  what: 'value' | 'cold' | 'exponent' | 'line' | 'open';
+  what: 'value' | 'second' | 'exponent' | 'line' | 'open';
   /** Standard deviation of the relative deviation (of the exponent itself for `exponent`). */
   sigma: number;
 }
@@ -43,7 +43,11 @@ export interface Circuit {
   isSteady: Uint8Array;
   parameters: Parameter[];
   valueParameter: Int32Array;
-  coldParameter: Int32Array;
+  /**
+   * Second uncertainty of a part, −1 for none: cold resistance of heaters, lamps and thermistors;
+   * series resistance of capacitors, drop of rectifiers, inductance of chokes, volts of windings.
+   */
+  secondParameter: Int32Array;
   heaterExponent: number;
   lampExponent: number;
   lineParameter: number;
@@ -57,8 +61,35 @@ export function valueSigma(part: Part): number {
     case 'fuse':
     case 'joint':
       return SETTINGS.contactSpread;
+    case 'rectifier':
+      return SETTINGS.rectifierSpread;
+    case 'capacitor':
+      // Electrolytics: −20 % to +50 %, evenly.
+      if (part.make === 'electrolytic') return 0.7 / Math.sqrt(12) / 1.15;
+      return (part.tolerance ?? 0.2) / Math.sqrt(3);
     default:
       return (part.tolerance ?? 0.1) / Math.sqrt(3);
+  }
+}
+
+/** Relative standard deviation of a part's second value; 0 where it has none. */
+export function secondSigma(part: Part): number {
+  switch (part.kind) {
+    case 'heater':
+    case 'lamp':
+      return SETTINGS.coldRatioSpread;
+    case 'thermistor':
+      return valueSigma(part);
+    case 'capacitor':
+      return SETTINGS.esrSpread;
+    case 'rectifier':
+      return SETTINGS.dropSpread;
+    case 'choke':
+      return 0.2 / Math.sqrt(3);
+    case 'winding':
+      return SETTINGS.windingSpread;
+    default:
+      return 0;
   }
 }
 
@@ -109,14 +140,11 @@ export function compileCircuit(netlist: Netlist, lineVolts?: number): Circuit {
   const heaterExponent = add({ part: -1, what: 'exponent', sigma: SETTINGS.exponentSpread });
   const lampExponent = add({ part: -1, what: 'exponent', sigma: SETTINGS.exponentSpread });
   const valueParameter = new Int32Array(parts.length);
-  const coldParameter = new Int32Array(parts.length).fill(-1);
+  const secondParameter = new Int32Array(parts.length).fill(-1);
   parts.forEach((part, index) => {
     valueParameter[index] = add({ part: index, what: 'value', sigma: valueSigma(part) });
-    if (part.kind === 'heater' || part.kind === 'lamp') {
-      coldParameter[index] = add({ part: index, what: 'cold', sigma: SETTINGS.coldRatioSpread });
-    } else if (part.kind === 'thermistor') {
-      coldParameter[index] = add({ part: index, what: 'cold', sigma: valueSigma(part) });
-    }
+    const second = secondSigma(part);
+    if (second > 0) secondParameter[index] = add({ part: index, what: 'second', sigma: second });
   });
 
   return {
@@ -135,7 +163,7 @@ export function compileCircuit(netlist: Netlist, lineVolts?: number): Circuit {
     isSteady: splitBlocks(parts, branches, nodes.length, hot, back, line?.ohms ?? 0),
     parameters,
     valueParameter,
-    coldParameter,
+    secondParameter,
     heaterExponent,
     lampExponent,
     lineParameter,

@@ -1,5 +1,4 @@
 import { SETTINGS } from '../tolerances';
-import type { BranchValues } from './branch-values';
 import type { Circuit } from './circuit';
 import { narrowOrder, ProfileMatrix } from './profile-matrix';
 
@@ -33,13 +32,17 @@ export class ColdNetwork {
     this.rhs = new Float64Array(free.length);
   }
 
-  /** Factors the network under the given values; false when a node is cut off altogether. */
-  solve(values: BranchValues): boolean {
+  /**
+   * Factors the network with one conductance per branch.
+   *
+   * @returns false when a node is cut off altogether.
+   */
+  solve(siemens: Float64Array): boolean {
     const { matrix, row, circuit } = this;
     matrix.clear();
     for (let i = 0; i < matrix.n; i += 1) matrix.add(i, i, SETTINGS.leastSiemens);
     circuit.branches.forEach(({ a, b }, k) => {
-      if (values.cold[k] > 0) matrix.addConductance(row[a], row[b], values.cold[k]);
+      if (siemens[k] > 0) matrix.addConductance(row[a], row[b], siemens[k]);
     });
     return matrix.factor();
   }

@@ -9,6 +9,16 @@ export const Law = {
   Hot: 1,
   /** Thermistor: p0 hot ohms, p1 amps, p2 exponent, p3 cold ohms. */
   Ntc: 2,
+  /** p0 farads, p1 series ohms, p2 leak ohms (infinite when sound). Waveform blocks only, as below. */
+  Capacitor: 3,
+  /** p0 drop volts, p1 ohms, p2 leak ohms; `a` is the anode. */
+  Rectifier: 4,
+  /** p0 henries, p1 ohms. */
+  Choke: 5,
+  /** p0 RMS volts at the day's line voltage, p1 ohms, p2 phase in degrees. */
+  Winding: 6,
+  /** p0 amps, p1 volts, p2 exponent. */
+  Load: 7,
 } as const;
 export type Law = (typeof Law)[keyof typeof Law];
 

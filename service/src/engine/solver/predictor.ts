@@ -1,3 +1,4 @@
+import type { SettledFault } from '../faults/apply';
 import { SETTINGS } from '../tolerances';
 import type { BranchValues } from './branch-values';
 import type { Circuit } from './circuit';
@@ -5,6 +6,7 @@ import { ColdNetwork } from './cold-network';
 import { Law } from './laws';
 import type { ReadingSpec } from './reading-spec';
 import { RmsNetwork } from './rms-network';
+import { WavePredictor } from './wave-predictor';
 
 /** Room for the unknown values of this many faults behind the circuit's own parameters. */
 export const FAULT_SLOTS = 6;
@@ -30,11 +32,15 @@ export interface Predictions {
 export class Predictor {
   readonly rms: RmsNetwork;
   readonly cold: ColdNetwork;
+  /** Null when the circuit has no block with a rectifier or reactance. */
+  readonly waves: WavePredictor | null;
   private readonly adjoint: Float64Array;
 
   constructor(readonly circuit: Circuit) {
     this.rms = new RmsNetwork(circuit);
     this.cold = new ColdNetwork(circuit);
+    const waves = new WavePredictor(circuit);
+    this.waves = waves.network.isNeeded ? waves : null;
     this.adjoint = new Float64Array(circuit.nodes.length);
   }
 
@@ -58,13 +64,17 @@ export class Predictor {
   /**
    * Predicts readings under one hypothesis.
    *
+   * @param faults the hypothesis behind the values; slots of unknown values follow their order.
    * @param into predictions to write over, made for as many readings.
+   * @param isExact works out in full how readings of waveform blocks move; slow.
    * @returns null when the set does not settle.
    */
   predict(
     values: BranchValues,
     specs: readonly ReadingSpec[],
+    faults: readonly SettledFault[],
     into?: Predictions,
+    isExact = false,
   ): Predictions | null {
     const { width } = this;
     const out = into ?? this.blank(specs.length);
@@ -78,7 +88,7 @@ export class Predictor {
       const row = out.sensitivity.subarray(r * width, (r + 1) * width);
       switch (specs[r].take) {
         case 'ohms':
-          if (!hasCold && !this.cold.solve(values)) return null;
+          if (!hasCold && !this.cold.solve(values.cold)) return null;
           hasCold = true;
           this.predictOhms(values, specs[r], r, row, out);
           break;
@@ -88,36 +98,44 @@ export class Predictor {
         case 'sign':
           break;
         default:
+          if (this.waves?.isWave(specs[r])) break;
           if (!hasPower && !this.rms.solve(values)) return null;
           hasPower = true;
           if (specs[r].take === 'amps') this.predictAmps(values, specs[r], r, row, out);
           else this.predictVolts(values, specs[r], r, row, out);
       }
     }
+    if (this.waves && !this.waves.fill(specs, faults, out, isExact)) return null;
     return out;
   }
 
   /**
    * What the meter should show, without sensitivities; a few times quicker than `predict`.
+   * Several faults in one waveform block are taken as acting in proportion.
    *
    * @param mean receives volts, amps or ln(ohms + offset), one per spec.
    * @returns false when the set does not settle.
    */
-  means(values: BranchValues, specs: readonly ReadingSpec[], mean: Float64Array): boolean {
+  means(
+    values: BranchValues,
+    specs: readonly ReadingSpec[],
+    faults: readonly SettledFault[],
+    mean: Float64Array,
+  ): boolean {
     const { rms, cold, adjoint } = this;
     let hasPower = false;
     let hasCold = false;
     for (let r = 0; r < specs.length; r += 1) {
       const { take, a, b, part, meter } = specs[r];
       if (take === 'ohms') {
-        if (!hasCold && !cold.solve(values)) return false;
+        if (!hasCold && !cold.solve(values.cold)) return false;
         hasCold = true;
         cold.response(a, b, adjoint);
         mean[r] = Math.log(Math.max(0, adjoint[a] - adjoint[b]) + SETTINGS.ohmsOffset);
       } else if (take === 'lifted-ohms') {
         const siemens = Math.max(values.cold[part], SETTINGS.leastSiemens);
         mean[r] = Math.log(1 / siemens + SETTINGS.ohmsOffset);
-      } else if (take !== 'sign') {
+      } else if (take !== 'sign' && !this.waves?.isWave(specs[r])) {
         if (!hasPower && !rms.solve(values)) return false;
         hasPower = true;
         if (take === 'amps') mean[r] = Math.abs(rms.amps[part]);
@@ -128,7 +146,7 @@ export class Predictor {
         }
       }
     }
-    return true;
+    return this.waves?.roughMeans(specs, faults, mean) ?? true;
   }
 
   private predictVolts(
@@ -218,7 +236,7 @@ export class Predictor {
         break;
       case Law.Hot:
         row[value] -= perOhms;
-        if (rms.isCold[k]) row[circuit.coldParameter[part]] -= perOhms;
+        if (rms.isCold[k]) row[circuit.secondParameter[part]] -= perOhms;
         else {
           const ratio = Math.abs(branchVolts) / values.p0[k];
           const shared =
@@ -227,7 +245,7 @@ export class Predictor {
         }
         break;
       default:
-        if (rms.isCold[k]) row[circuit.coldParameter[part]] += perOhms;
+        if (rms.isCold[k]) row[circuit.secondParameter[part]] += perOhms;
         else row[value] += (across * branchVolts) / rms.slope[k];
     }
   }
@@ -285,8 +303,8 @@ export class Predictor {
     if (state !== 0 || isLeak) return;
     if (values.law[k] === Law.Hot) {
       row[circuit.valueParameter[part]] -= perOhms;
-      row[circuit.coldParameter[part]] -= perOhms;
-    } else if (values.law[k] === Law.Ntc) row[circuit.coldParameter[part]] += perOhms;
+      row[circuit.secondParameter[part]] -= perOhms;
+    } else if (values.law[k] === Law.Ntc) row[circuit.secondParameter[part]] += perOhms;
     else row[circuit.valueParameter[part]] += perOhms;
   }
 }

@@ -41,7 +41,7 @@ export class RmsNetwork {
     this.isCold = new Uint8Array(branches.length);
     this.lawVolts = new Float64Array(branches.length);
     this.active = Int32Array.from(
-      branches.map((_, k) => k).filter((k) => isSteady[k] || branches[k].isLeak),
+      branches.map((_, k) => k).filter((k) => isSteady[branches[k].part]),
     );
     this.row = new Int32Array(nodes.length).fill(-1);
     const isFree = (node: number) => node !== circuit.hot && node !== circuit.return;

@@ -23,7 +23,7 @@ export function chokeShare(
   return { share: loss / (loss + ohms), siemens: 1 / (loss + ohms) };
 }
 
-/** Conductance of an element that does not depend on the cycle; 0 for slow ones. */
+/** Conductance of an element; slow ones get theirs from the cycle. */
 function fixedSiemens(element: BranchElement, omega: number): number {
   switch (element.kind) {
     case 'resistance':
@@ -36,6 +36,8 @@ function fixedSiemens(element: BranchElement, omega: number): number {
       return 1 / Math.max(element.ohms, LIMITS.leastRectifierOhms);
     case 'source':
       return 1 / Math.max(element.ohms, LIMITS.leastRectifierOhms);
+    case 'load':
+      return element.amps / element.volts;
     default:
       return 0;
   }
@@ -60,7 +62,9 @@ export function branchLaws(block: Topology): BranchLaws {
     else if (element.kind === 'source') laws.sine[k] = -siemens * sourcePeak(element);
     else if (element.kind === 'rectifier') {
       laws.steady[k] = -siemens * element.dropVolts;
-      laws.blockedSiemens[k] = element.reverseOhms ? 1 / element.reverseOhms : 0;
+      laws.blockedSiemens[k] = element.reverseOhms
+        ? 1 / element.reverseOhms
+        : LIMITS.blockedSiemens;
     }
   });
   return laws;

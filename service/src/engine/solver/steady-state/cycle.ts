@@ -3,10 +3,14 @@ import { cubicAt, cubicTurn, cubicZero, type Span } from './cubic';
 import { dot } from './dense';
 import type { Network } from './network';
 
-/** Voltage below which a rectifier counts as being at its switching point, as a fraction of scale. */
+/** How far a blocked rectifier may be above its drop, as a fraction of scale; switching is located to it. */
 const AT_SWITCH = 1e-10;
+/** How far the drop in a conducting one's own resistance may be below zero: just above rounding. */
+const BACKWARDS = 1e-13;
 /** Pulses a cubic says are this close to reaching conduction are looked at exactly. */
 const NEAR_SWITCH = 1e-6;
+/** The first step after a switching is this many times shorter. */
+const FINEST = 32;
 const MOST_LOCATIONS = 12;
 
 /** One cycle as it was run: samples of ξ and the pattern that held between them. */
@@ -79,18 +83,15 @@ export class CycleRunner {
     const mostSwitchings = 60 + 20 * rectifiers.length;
     start.set(x0);
     this.clock(start, 0);
-    if (monodromy) {
-      monodromy.fill(0);
-      for (let i = 0; i < states; i += 1) monodromy[i * states + i] = 1;
-    }
     trace.count = 0;
     let time = 0;
+    let finer = 0;
     let at = this.settle(start);
     this.look(network.met[at], start, this.gaps, this.rates);
     this.record(time, start);
     while (time < period) {
       const conduction = network.met[at];
-      let length = Math.min(step, period - time);
+      let length = Math.min(finer > 1 ? step / finer : step, period - time);
       this.move(conduction, start, length, time, trial);
       this.look(conduction, trial, this.nextGaps, this.nextRates);
       let flips = -1;
@@ -104,10 +105,6 @@ export class CycleRunner {
       } else {
         this.isRough = true;
       }
-      if (monodromy && length > 0) {
-        for (let c = 0; c < states; c += 1)
-          conduction.propagator.carry(monodromy, c * states, length);
-      }
       const isLast = time + length >= period * (1 - 1e-13);
       time = isLast ? period : time + length;
       if (length > 0) {
@@ -120,12 +117,16 @@ export class CycleRunner {
         if (flips >= 0) this.pattern = conduction.pattern ^ (1 << flips);
         at = this.settle(start);
         this.look(network.met[at], start, this.gaps, this.rates);
+        // What is faster than a step shows right after a switching: begin finely, h/64, h/32, h/16 …
+        finer = 2 * FINEST;
       } else {
         this.gaps.set(this.nextGaps);
         this.rates.set(this.nextRates);
+        if (finer > 1) finer = finer > FINEST ? FINEST : finer / 2;
       }
     }
     trace.which[trace.count - 1] = at;
+    if (monodromy) this.differentiate(monodromy);
     this.x.set(trial.subarray(0, states));
     return trace;
   }
@@ -133,6 +134,19 @@ export class CycleRunner {
   /** States at the end of the last run. */
   get end(): Float64Array {
     return this.x;
+  }
+
+  private differentiate(monodromy: Float64Array): void {
+    const { trace, network } = this;
+    const { states } = network.block;
+    monodromy.fill(0);
+    for (let i = 0; i < states; i += 1) monodromy[i * states + i] = 1;
+    for (let k = 0; k + 1 < trace.count;) {
+      const which = trace.which[k];
+      const from = trace.time[k];
+      while (k + 1 < trace.count && trace.which[k] === which) k += 1;
+      network.met[which].propagator.carryAll(monodromy, trace.time[k] - from);
+    }
   }
 
   /**
@@ -212,7 +226,6 @@ export class CycleRunner {
   private settle(xi: Float64Array): number {
     const { network } = this;
     const { rectifiers, width, scale } = network.block;
-    const tolerance = AT_SWITCH * scale;
     let at = network.indexOf(this.pattern);
     for (let round = 0; round < 8 + 4 * 2 ** Math.min(rectifiers.length, 8); round += 1) {
       const conduction = network.met[at];
@@ -220,7 +233,7 @@ export class CycleRunner {
       for (let i = 0; i < rectifiers.length; i += 1) {
         const gap = dot(conduction.gap, i * width, xi, 0, width);
         const isOn = (conduction.pattern & (1 << i)) !== 0;
-        if (isOn ? gap >= -tolerance : gap <= tolerance) continue;
+        if (isOn ? gap >= -BACKWARDS * scale : gap <= AT_SWITCH * scale) continue;
         offenders |= 1 << i;
         if (round >= 6) break;
       }
@@ -243,14 +256,15 @@ export class CycleRunner {
   ): { rectifier: number; length: number } | undefined {
     const { gaps, rates, nextGaps, nextRates, network, trial } = this;
     const { rectifiers, scale } = network.block;
-    const tolerance = AT_SWITCH * scale;
     let found: { rectifier: number; length: number } | undefined;
     let reach = length;
     for (let tries = 0; tries <= rectifiers.length; tries += 1) {
       let earliest: { rectifier: number; span: Span; guess: number } | undefined;
       for (let i = 0; i < rectifiers.length; i += 1) {
         if (found?.rectifier === i) continue;
-        const sign = (conduction.pattern & (1 << i)) !== 0 ? -1 : 1;
+        const isOn = (conduction.pattern & (1 << i)) !== 0;
+        const sign = isOn ? -1 : 1;
+        const tolerance = (isOn ? BACKWARDS : AT_SWITCH) * scale;
         const span: Span = {
           length: reach,
           from: sign * gaps[i],
@@ -260,13 +274,14 @@ export class CycleRunner {
         };
         if (span.to <= tolerance && !this.peaksInside(conduction, start, time, i, sign, span))
           continue;
-        if (span.from > -tolerance) {
-          if (span.from > 0 && span.fromSlope >= 0) {
+        if (span.from > 0) {
+          if (span.fromSlope >= 0) {
             trial.set(start);
             return { rectifier: i, length: 0 };
           }
-          span.from = -tolerance;
+          span.from = 0;
         }
+        span.from -= tolerance;
         const guess = cubicZero(span) * span.length;
         if (!earliest || guess < earliest.guess) earliest = { rectifier: i, span, guess };
       }
@@ -309,7 +324,10 @@ export class CycleRunner {
     return true;
   }
 
-  /** Instant at which a rectifier's quantity passes zero, exactly; leaves `trial` there. */
+  /**
+   * Instant at which a rectifier's quantity has just passed zero, so that its new state is the right
+   * one; leaves `trial` there.
+   */
   private locate(
     conduction: Conduction,
     start: Float64Array,
@@ -320,14 +338,16 @@ export class CycleRunner {
   ): number {
     const { trial, network } = this;
     const { width, scale } = network.block;
-    const sign = (conduction.pattern & (1 << i)) !== 0 ? -1 : 1;
+    const isOn = (conduction.pattern & (1 << i)) !== 0;
+    const sign = isOn ? -1 : 1;
+    const beyond = (isOn ? 0.5 * BACKWARDS : 0.05 * AT_SWITCH) * scale;
     let low = 0;
     let part = { ...span };
     let at = guess;
     for (let round = 0; round < MOST_LOCATIONS; round += 1) {
       this.move(conduction, start, at, time, trial);
-      const value = sign * dot(conduction.gap, i * width, trial, 0, width);
-      if (Math.abs(value) <= 0.1 * AT_SWITCH * scale) break;
+      const value = sign * dot(conduction.gap, i * width, trial, 0, width) - beyond;
+      if (Math.abs(value) < beyond) break;
       const slope = sign * dot(conduction.gapRate, i * width, trial, 0, width);
       if (value > 0) {
         part = { ...part, length: at - low, to: value, toSlope: slope };

@@ -6,7 +6,7 @@ export type BranchElement =
   | { kind: 'resistance'; a: number; b: number; ohms: number }
   | { kind: 'capacitor'; a: number; b: number; farads: number; esr: number }
   | { kind: 'inductor'; a: number; b: number; henries: number; ohms: number }
-  /** `a` is the anode. Conducts above `dropVolts` through `ohms`; blocked it is `reverseOhms`, or nothing. */
+  /** `a` is the anode. Conducts above `dropVolts` through `ohms`; blocked it is `reverseOhms`, 10 GΩ if left out. */
   | {
       kind: 'rectifier';
       a: number;
@@ -54,6 +54,8 @@ export const LIMITS = {
   leastEsr: 1e-4,
   /** Resistance across a choke's inductance (core loss), in multiples of its reactance. */
   chokeLoss: 1e3,
+  /** Leakage of a blocked rectifier; without it a bridge's floating source has no voltage of its own. */
+  blockedSiemens: 1e-10,
   leastOhms: 1e-6,
   leastRectifierOhms: 1e-3,
 } as const;

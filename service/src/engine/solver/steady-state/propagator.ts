@@ -16,6 +16,8 @@ export class Propagator {
   private readonly own: Float64Array[] = [];
   /** Per level: states×3 answers to sine, cosine and one. */
   private readonly driven: Float64Array[] = [];
+  /** Increments over 2, 4, 8 … steps, made when asked for. */
+  private readonly doublings: Float64Array[] = [];
   private readonly turn: { sin: number; cos: number; length: number }[] = [];
   private readonly scratch: Float64Array;
   private readonly term: Float64Array;
@@ -91,6 +93,72 @@ export class Propagator {
       left -= this.turn[level].length;
     }
     this.rest(x, at, left, 0, 0, 0);
+  }
+
+  /**
+   * Multiplies a matrix from the left with the answer of a deviation over any length of time, also
+   * many steps: put together from doublings and halvings of the step. What is left below the
+   * shortest level is taken to second order, which serves a Newton method.
+   *
+   * @param m n×n, column after column.
+   */
+  carryAll(m: Float64Array, length: number): void {
+    const { n, step, halvings } = this;
+    let left = length;
+    let top = 0;
+    while (left >= step * 2 ** (top + 1)) top += 1;
+    for (let double = top; double >= 0; double -= 1) {
+      const part = step * 2 ** double;
+      if (left < part) continue;
+      this.multiply(double === 0 ? this.own[0] : this.doubling(double), m);
+      left -= part;
+    }
+    for (let level = 1; level <= halvings; level += 1) {
+      if (left < this.turn[level].length) continue;
+      this.multiply(this.own[level], m);
+      left -= this.turn[level].length;
+    }
+    if (left <= 0) return;
+    const rest = new Float64Array(n * n);
+    for (let i = 0; i < n; i += 1) {
+      for (let j = 0; j < n; j += 1) {
+        let sum = 0;
+        for (let k = 0; k < n; k += 1) sum += this.a[i * n + k] * this.a[k * n + j];
+        rest[i * n + j] = left * (this.a[i * n + j] + (left / 2) * sum);
+      }
+    }
+    this.multiply(rest, m);
+  }
+
+  /** Increment over 2^k steps. */
+  private doubling(k: number): Float64Array {
+    const { n, doublings } = this;
+    for (let have = doublings.length; have < k; have += 1) {
+      const half = have === 0 ? this.own[0] : doublings[have - 1];
+      const whole = new Float64Array(n * n);
+      for (let i = 0; i < n; i += 1) {
+        for (let j = 0; j < n; j += 1) {
+          let sum = 2 * half[i * n + j];
+          for (let q = 0; q < n; q += 1) sum += half[i * n + q] * half[q * n + j];
+          whole[i * n + j] = sum;
+        }
+      }
+      doublings.push(whole);
+    }
+    return doublings[k - 1];
+  }
+
+  /** m ← (1 + increment)·m, m stored column after column. */
+  private multiply(increment: Float64Array, m: Float64Array): void {
+    const { n, scratch } = this;
+    for (let at = 0; at < n * n; at += n) {
+      for (let i = 0, p = 0; i < n; i += 1) {
+        let sum = m[at + i];
+        for (let j = 0; j < n; j += 1, p += 1) sum += increment[p] * m[at + j];
+        scratch[i] = sum;
+      }
+      for (let i = 0; i < n; i += 1) m[at + i] = scratch[i];
+    }
   }
 
   private apply(

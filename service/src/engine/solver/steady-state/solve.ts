@@ -9,7 +9,7 @@ import { compileBlock, type Topology } from './topology';
 
 /** How a block is solved. */
 export interface SolveOptions {
-  /** Steps per cycle: where rectifiers are looked at. Default 128. */
+  /** Steps per cycle: where rectifiers are looked at. Default 64. */
   steps?: number;
   /** A solved neighbour: the same nodes, elements mostly at the same places in the list. */
   start?: SteadyState | WarmStart;
@@ -44,7 +44,7 @@ export function solveSteadyState(
   options: SolveOptions = {},
 ): SteadyState {
   const block = compileBlock(elements, nodes, hertz);
-  const network = new Network(block, block.period / (options.steps ?? 128));
+  const network = new Network(block, block.period / (options.steps ?? 64));
   const runner = new CycleRunner(network);
   const tolerance = options.tolerance ?? 1e-6;
   const mostCycles = options.mostCycles ?? 80;
@@ -63,9 +63,10 @@ export function solveSteadyState(
     const size = largestOf(step, weights) / block.scale;
     const isSmall = size <= tolerance;
     const isLast = cycle >= mostCycles;
-    if (step && size < 0.3) runner.correct(step);
+    const isNear = size < 0.3;
+    if (step && isNear && (isSmall || z.length > 0)) runner.correct(step);
     let miss = 0;
-    if (z.length > 0 && (size < 0.3 || isLast)) {
+    if (z.length > 0 && (isNear || isLast)) {
       const gram = gatherGram(network, runner.trace);
       const r = slowMiss(network, gram, z);
       miss = r.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
@@ -154,7 +155,6 @@ function slowMiss(
   const rows = new Float64Array(network.met.length * block.width);
   return z.map((value, i) => {
     const element = block.elements[block.slow[i]] as SlowElement;
-    if (value === -Infinity) return 0;
     network.met.forEach((conduction, m) => {
       const row = rows.subarray(m * block.width, (m + 1) * block.width);
       conduction.pairRow(element.a, element.b, row);

@@ -23,7 +23,7 @@ export interface Topology {
   stateElement: number[];
   /** Elements that are rectifiers, in order of their bit in a pattern. */
   rectifiers: number[];
-  /** Elements whose conductance follows from the cycle: loads, heaters, lamps, thermistors. */
+  /** Elements whose conductance follows from the cycle: curved loads, heaters, lamps, thermistors. */
   slow: number[];
   /** 1 for a source without resistance. */
   isIdeal: Uint8Array;
@@ -103,6 +103,8 @@ export function compileBlock(
         rectifiers.push(k);
         break;
       case 'load':
+        if (element.exponent !== 1 && element.amps > 0) slow.push(k);
+        break;
       case 'hot':
       case 'ntc':
         slow.push(k);

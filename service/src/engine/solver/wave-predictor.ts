@@ -1,0 +1,277 @@
+import type { SettledFault } from '../faults/apply';
+import { applyFaults } from '../faults/apply';
+import { SETTINGS } from '../tolerances';
+import { type BranchValues, blankValues, healthyValues } from './branch-values';
+import type { Circuit } from './circuit';
+import { ColdNetwork } from './cold-network';
+import { Law } from './laws';
+import type { Predictions } from './predictor';
+import type { ReadingSpec } from './reading-spec';
+import { WaveNetwork, type WaveSolution } from './wave-network';
+import { perturb } from './wave-perturb';
+
+/** Solutions kept per case; each holds one number per reading. */
+const MOST_KEPT = 20000;
+/** Finite-difference step, in standard deviations of the parameter. */
+const STEP = 0.5;
+/** A rail that fell below this share of its healthy value shows only millivolts of no meaning. */
+const COLLAPSED = 0.01;
+
+/** Readings of a waveform block as numbers, and the ohms behind each voltage for its meter. */
+type Means = Float64Array;
+
+/**
+ * Predicts readings in blocks with rectifiers. A full solution takes about a millisecond, so
+ * results are remembered by fault, and sensitivities are worked out in full only for a few
+ * hypotheses: the others take those of the healthy set in proportion to their own readings.
+ */
+export class WavePredictor {
+  readonly network: WaveNetwork;
+  /** Periodic steady states solved so far. */
+  solved = 0;
+  private readonly loading: ColdNetwork;
+  private readonly healthy: BranchValues;
+  private readonly scratch: BranchValues;
+  private readonly moved: BranchValues;
+  private readonly means = new Map<string, Means | null>();
+  private readonly exact = new Map<string, Float64Array>();
+  private readonly adjoint: Float64Array;
+  private specs: readonly ReadingSpec[] = [];
+  private rows: number[] = [];
+
+  constructor(private readonly circuit: Circuit) {
+    this.network = new WaveNetwork(circuit);
+    this.loading = new ColdNetwork(circuit);
+    this.healthy = healthyValues(circuit);
+    this.scratch = blankValues(circuit.branches.length);
+    this.moved = blankValues(circuit.branches.length);
+    this.adjoint = new Float64Array(circuit.nodes.length);
+  }
+
+  /** True when a reading belongs to a waveform block. */
+  isWave(spec: ReadingSpec): boolean {
+    const { take, a, b, part } = spec;
+    if (take === 'ohms' || take === 'lifted-ohms' || take === 'sign') return false;
+    if (part >= 0) return this.circuit.isSteady[part] === 0;
+    const isInside = (node: number) =>
+      this.network.rowOf(node) > 0 && node !== this.circuit.hot && node !== this.circuit.return;
+    return isInside(a) || isInside(b) || take === 'dc-volts' || take === 'ripple-volts';
+  }
+
+  /** Readings that the next calls are about; forgets what was remembered for others. */
+  private about(specs: readonly ReadingSpec[]): void {
+    if (specs === this.specs) return;
+    this.specs = specs;
+    this.rows = specs.map((_, r) => r).filter((r) => this.isWave(specs[r]));
+    this.means.clear();
+    this.exact.clear();
+  }
+
+  /**
+   * Fills the rows of waveform readings of a prediction.
+   *
+   * @param isExact works the sensitivities out for this very hypothesis.
+   * @returns false when the block does not settle.
+   */
+  fill(
+    specs: readonly ReadingSpec[],
+    faults: readonly SettledFault[],
+    out: Predictions,
+    isExact: boolean,
+  ): boolean {
+    this.about(specs);
+    if (this.rows.length === 0) return true;
+    const own = this.inBlock(faults);
+    const means = this.meansOf(own);
+    const base = this.meansOf([]);
+    if (!means || !base) return false;
+    const { circuit } = this;
+    const width = circuit.parameters.length;
+    const key = keyOf(own);
+    if (isExact && !this.exact.has(key)) this.exact.set(key, this.differences(own, means));
+    const exact = this.exact.get(key);
+    if (!this.exact.has('')) this.exact.set('', this.differences([], base));
+    const reference = this.exact.get('')!;
+    this.rows.forEach((r, i) => {
+      out.mean[r] = means[i];
+      out.shown[r] = means[i];
+      const share = Math.abs(base[i]) > 1e-9 ? means[i] / base[i] : 0;
+      for (let p = 0; p < width; p += 1) {
+        out.sensitivity[r * out.width + p] = exact
+          ? exact[i * width + p]
+          : reference[i * width + p] * share;
+      }
+      const isDown = Math.abs(means[i]) < COLLAPSED * Math.abs(base[i]);
+      const vague = isDown ? 0.3 * means[i] : SETTINGS.waveVagueness * means[i];
+      const floor = isDown ? SETTINGS.collapsedVolts : SETTINGS.waveFloorVolts;
+      out.stray[r] = vague * vague + floor * floor;
+    });
+    faults.forEach((fault, slot) => {
+      if (fault.width === undefined || this.circuit.isSteady[fault.part]) return;
+      const slope = this.slopeOf(fault);
+      const alone = this.meansOf([fault]);
+      if (!slope || !alone) return;
+      this.rows.forEach((r, i) => {
+        const share = own.length === 1 ? 1 : Math.abs(alone[i]) > 1e-9 ? means[i] / alone[i] : 0;
+        out.sensitivity[r * out.width + width + slot] = slope[i] * share;
+      });
+    });
+    return true;
+  }
+
+  /**
+   * Fills only the means; two and more faults are taken as acting in proportion, which is rough but
+   * needs no solution of its own.
+   */
+  roughMeans(
+    specs: readonly ReadingSpec[],
+    faults: readonly SettledFault[],
+    mean: Float64Array,
+  ): boolean {
+    this.about(specs);
+    if (this.rows.length === 0) return true;
+    const own = this.inBlock(faults);
+    const base = this.meansOf([]);
+    if (!base) return false;
+    const singles = own.map((fault) => this.meansOf([fault]));
+    if (singles.some((single) => !single)) return false;
+    this.rows.forEach((r, i) => {
+      let value = base[i];
+      for (const single of singles) {
+        if (Math.abs(base[i]) > 1e-9) value *= single![i] / base[i];
+        else value += single![i];
+      }
+      mean[r] = value;
+    });
+    return true;
+  }
+
+  private inBlock(faults: readonly SettledFault[]): SettledFault[] {
+    return faults
+      .filter(({ part }) => !this.circuit.isSteady[part])
+      .sort((x, y) => x.part - y.part || (x.mode < y.mode ? -1 : 1));
+  }
+
+  /** Readings under some faults of the block, remembered. */
+  private meansOf(faults: readonly SettledFault[]): Means | null {
+    const key = keyOf(faults);
+    const known = this.means.get(key);
+    if (known !== undefined) return known;
+    if (this.means.size > MOST_KEPT) this.means.clear();
+    const values = applyFaults(this.healthy, this.circuit, faults, this.scratch);
+    const means = this.measure(values, 1);
+    this.means.set(key, means);
+    return means;
+  }
+
+  /** Solves the block and reads every meter. */
+  private measure(values: BranchValues, line: number): Means | null {
+    const solution = this.network.solve(values, line);
+    this.solved += 1;
+    if (!solution) return null;
+    const out = new Float64Array(this.rows.length);
+    let isLoaded = false;
+    this.rows.forEach((r, i) => {
+      const spec = this.specs[r];
+      const open = readMeter(this.network, solution, spec, this.circuit);
+      if (spec.take !== 'dc-volts') {
+        out[i] = open;
+        return;
+      }
+      if (!isLoaded) {
+        if (!this.loading.solve(this.directConductances(values, solution))) return;
+        isLoaded = true;
+      }
+      this.loading.response(spec.a, spec.b, this.adjoint);
+      const behind = this.adjoint[spec.a] - this.adjoint[spec.b];
+      out[i] = open / (1 + spec.meter.siemens * behind);
+    });
+    return out;
+  }
+
+  /** What a small direct current meets in every branch: decides how far a meter pulls a node down. */
+  private directConductances(values: BranchValues, { state, element }: WaveSolution): Float64Array {
+    return Float64Array.from(this.circuit.branches, (_, k) => {
+      const [p0, p1, p2] = [values.p0[k], values.p1[k], values.p2[k]];
+      switch (values.law[k]) {
+        case Law.Ohmic:
+          return p0;
+        case Law.Hot:
+          return p1 / p0;
+        case Law.Ntc:
+          return 1 / p0;
+        case Law.Capacitor:
+          return 1 / p2;
+        case Law.Rectifier:
+          // Averaged over a cycle, a conducting rectifier lets a direct current through for a tenth of it.
+          return (state.current(element[k]).mean > 1e-6 ? 0.1 / p1 : 0) + 1 / p2;
+        case Law.Load:
+          return (p2 * p0) / p1;
+        default:
+          return 1 / p1;
+      }
+    });
+  }
+
+  /** Change of every reading per unit of every parameter, by finite differences. */
+  private differences(faults: readonly SettledFault[], base: Means): Float64Array {
+    const { circuit } = this;
+    const width = circuit.parameters.length;
+    const out = new Float64Array(this.rows.length * width);
+    const values = applyFaults(this.healthy, circuit, faults);
+    circuit.parameters.forEach((parameter, p) => {
+      const by = STEP * parameter.sigma;
+      const { line, isMoved } = perturb(circuit, values, parameter, by, this.moved);
+      if (!isMoved) return;
+      const moved = this.measure(this.moved, line);
+      if (!moved) return;
+      this.rows.forEach((_, i) => {
+        out[i * width + p] = (moved[i] - base[i]) / by;
+      });
+    });
+    return out;
+  }
+
+  /** Change of every reading per unit of ln(value) of one fault standing alone. */
+  private slopeOf(fault: SettledFault): Float64Array | null {
+    const up = this.meansOf([shifted(fault, 1)]);
+    const down = this.meansOf([shifted(fault, -1)]);
+    if (!up || !down) return null;
+    return Float64Array.from(up, (value, i) => (value - down[i]) / (2 * fault.width!));
+  }
+}
+
+/** The same fault with its value one cell further up or down. */
+function shifted(fault: SettledFault, cells: number): SettledFault {
+  return { ...fault, value: fault.value! * Math.exp(cells * fault.width!) };
+}
+
+function keyOf(faults: readonly SettledFault[]): string {
+  return faults
+    .map(
+      ({ part, mode, value, volts, amps }) =>
+        `${part}${mode}${value === undefined ? '' : Math.log(value).toFixed(5)}${volts ?? ''},${amps ?? ''}`,
+    )
+    .join('|');
+}
+
+/** What a meter that draws nothing shows. */
+export function readMeter(
+  network: WaveNetwork,
+  { state, element }: WaveSolution,
+  { take, a, b, part }: ReadingSpec,
+  circuit: Circuit,
+): number {
+  if (take === 'amps') {
+    if (element[part] < 0) return 0;
+    const current = state.current(element[part]);
+    // On the line's side there is hardly a direct part; an AC ammeter is used there.
+    return Math.abs(current.mean) < 0.3 * current.rms ? current.rms : current.mean;
+  }
+  const x = network.rowOf(a);
+  const y = network.rowOf(b);
+  if (x < 0 || y < 0) return take === 'ac-volts' && a === circuit.hot ? circuit.lineVolts : 0;
+  if (take === 'dc-volts') return state.pair(x, y).mean;
+  if (take === 'ripple-volts') return state.pairPeakToPeak(x, y);
+  return state.pair(x, y).acRms;
+}
