@@ -1,7 +1,7 @@
 import { type Netlist, type Part } from '@engine/netlist/types';
 
 /** Nodes that other figures are drawn down to: the line's two wires and the reference. */
-export function railsOf(netlist: Netlist): Set<string> {
+export function railsIn(netlist: Netlist): Set<string> {
   const rails = new Set([netlist.reference]);
   if (netlist.line) rails.add(netlist.line.hot).add(netlist.line.return);
   return rails;

@@ -1,6 +1,27 @@
 import { type NextReading } from '@engine/diagnosis-types';
 import { type AsFound, type Netlist } from '@engine/netlist/types';
-import { type Place } from '@/lib/bench/places';
+import { Button, Spinner, Text, Title3 } from '@fluentui/react-components';
+import { ArrowUndoRegular, CalculatorRegular, TableRegular } from '@fluentui/react-icons';
+import { useEffect, useMemo, useRef, useState } from 'react';
+import { type Place, placeKey } from '@/lib/bench/places';
+import { problemInWords } from '@/lib/bench/problem';
+import { isPoweredReading } from '@/lib/bench/takes';
+import { useReadings } from '../api/get-readings';
+import { isBlock, parseBlock, placeBlock } from '../grid/block-paste';
+import { type GridSection, sectionsOf } from '../grid/grid-model';
+import { type GridSpot } from '../grid/grid-moves';
+import { useIsNarrow } from '../hooks/useIsNarrow';
+import { useMeterChoice } from '../hooks/useMeterChoice';
+import { useReadingEntry } from '../hooks/useReadingEntry';
+import { useReadingSender } from '../hooks/useReadingSender';
+import { AddLeads } from './AddLeads';
+import { BenchEntry } from './BenchEntry';
+import { CautionNote } from './CautionNote';
+import { MeterPicker } from './MeterPicker';
+import { NextReadingNote } from './NextReadingNote';
+import { useReadingsPanelStyles } from './ReadingsPanel.styles';
+import { SectionTable } from './SectionTable';
+import { SendStatus } from './SendStatus';
 
 export interface ReadingsPanelProps {
   caseId: string;
@@ -19,7 +40,160 @@ export interface ReadingsPanelProps {
   goTo?: Place;
 }
 
-/** The grid of a case's readings. */
-export function ReadingsPanel(_props: ReadingsPanelProps) {
-  return null;
+const NO_NEXT: NextReading[] = [];
+const NO_READINGS: never[] = [];
+
+/** The readings of a case: a grid for the desk, one reading at a time for the bench. */
+export function ReadingsPanel(props: ReadingsPanelProps) {
+  const { caseId, nextReadings = NO_NEXT, canRecord = true, goTo } = props;
+  const styles = useReadingsPanelStyles();
+  const query = useReadings(caseId);
+  const readings = query.data ?? NO_READINGS;
+  const [meterId, setMeterId] = useMeterChoice();
+  const entry = useReadingEntry(caseId, readings, meterId);
+  const sendState = useReadingSender(caseId);
+  const isNarrow = useIsNarrow();
+  const [mode, setMode] = useState<'grid' | 'bench'>();
+  const [added, setAdded] = useState<Place[]>([]);
+  const [place, setPlace] = useState<Place>();
+  const [left, setLeft] = useState(0);
+  const root = useRef<HTMLDivElement>(null);
+  const isBench = (mode ?? (isNarrow ? 'bench' : 'grid')) === 'bench';
+
+  const netlist = useMemo(
+    () => withAdded(props.netlist, props.asFound),
+    [props.netlist, props.asFound],
+  );
+  const sections = useMemo(
+    () => sectionsOf(netlist, [...readings, ...nextReadings, ...added]),
+    [netlist, readings, nextReadings, added],
+  );
+
+  const jumpTo = (target: Place) => {
+    setPlace(target);
+    if (isPoweredReading(target.take) && !props.isCautionAcknowledged) props.onNeedCautions();
+    requestAnimationFrame(() => focusPlace(root.current, target));
+  };
+  useEffect(() => {
+    if (!goTo) return;
+    const id = requestAnimationFrame(() => {
+      setPlace(goTo);
+      focusPlace(root.current, goTo);
+    });
+    return () => cancelAnimationFrame(id);
+  }, [goTo]);
+
+  const pasteBlock = (section: GridSection, spot: GridSpot, text: string): boolean => {
+    if (!isBlock(text)) return false;
+    const block = placeBlock(section, spot, parseBlock(text));
+    block.values.forEach((value) => entry.enter(value.place, value.text));
+    setLeft(block.left);
+    return true;
+  };
+  const undo = () => {
+    const target = entry.undo();
+    if (target) requestAnimationFrame(() => focusPlace(root.current, target));
+  };
+
+  if (query.isPending) return <Spinner label="Fetching the readings" />;
+  if (query.isError && !query.data) {
+    return (
+      <div role="alert" className={styles.failed}>
+        <Text>{problemInWords(query.error)}</Text>
+        <Button onClick={() => void query.refetch()}>Try again</Button>
+      </div>
+    );
+  }
+  const next = nextReadings[0];
+  return (
+    <div className={styles.root} ref={root}>
+      {next && canRecord && !isBench && (
+        <NextReadingNote netlist={netlist} next={next} onGo={() => jumpTo(next)} />
+      )}
+      <div className={styles.bar}>
+        <MeterPicker meterId={meterId} onChoose={setMeterId} />
+        <Button
+          size="small"
+          icon={<ArrowUndoRegular />}
+          disabled={!entry.canUndo}
+          className={styles.touch}
+          onClick={undo}
+        >
+          Undo
+        </Button>
+        <Button
+          size="small"
+          icon={isBench ? <TableRegular /> : <CalculatorRegular />}
+          className={styles.touch}
+          onClick={() => setMode(isBench ? 'grid' : 'bench')}
+        >
+          {isBench ? 'All readings' : 'One at a time'}
+        </Button>
+        <SendStatus state={sendState} />
+      </div>
+      {left > 0 && (
+        <Text role="status" size={200}>
+          {left === 1 ? 'One pasted value' : `${left} pasted values`} found no place in the grid.
+        </Text>
+      )}
+      {isBench ? (
+        <BenchEntry
+          netlist={netlist}
+          sections={sections}
+          nextReadings={nextReadings}
+          entry={entry}
+          place={place}
+          isReadOnly={!canRecord}
+          isCautionAcknowledged={props.isCautionAcknowledged}
+          onNeedCautions={props.onNeedCautions}
+          onPlace={setPlace}
+        />
+      ) : (
+        sections.map((section) => {
+          const isLocked = section.id === 'powered' && !props.isCautionAcknowledged;
+          return (
+            <section key={section.id} className={styles.section} aria-label={section.title}>
+              <Title3 as="h3" className={styles.title}>
+                {section.title}
+              </Title3>
+              {isLocked && canRecord && <CautionNote onNeedCautions={props.onNeedCautions} />}
+              <SectionTable
+                caseId={caseId}
+                netlist={netlist}
+                section={section}
+                entry={entry}
+                isReadOnly={!canRecord || isLocked}
+                next={canRecord ? next : undefined}
+                onPasteText={pasteBlock}
+                onFocusPlace={setPlace}
+              />
+            </section>
+          );
+        })
+      )}
+      {!isBench && canRecord && (
+        <AddLeads
+          netlist={netlist}
+          onAdd={(target) => {
+            setAdded((old) => [...old, target]);
+            jumpTo(target);
+          }}
+        />
+      )}
+    </div>
+  );
+}
+
+function withAdded(netlist: Netlist, asFound: readonly AsFound[] = []): Netlist {
+  const added = asFound.flatMap((entry) => (entry.change === 'added' ? [entry.add] : []));
+  return added.length > 0 ? { ...netlist, parts: [...netlist.parts, ...added] } : netlist;
+}
+
+function focusPlace(root: HTMLElement | null, place: Place): void {
+  const cells = root?.querySelectorAll<HTMLElement>(
+    `[data-place="${CSS.escape(placeKey(place))}"]`,
+  );
+  const cell = cells?.[0];
+  cell?.scrollIntoView({ block: 'center', behavior: 'auto' });
+  cell?.focus();
 }

@@ -1,5 +1,5 @@
 import { type Netlist, type Part } from '@engine/netlist/types';
-import { otherEnd, partsByNode, railsOf, separate } from '@/lib/bench/graph';
+import { otherEnd, partsByNode, railsIn, separate } from '@/lib/bench/graph';
 
 /** A part of the circuit that is drawn as one figure. */
 export interface Block {
@@ -21,7 +21,7 @@ export interface Block {
  * @returns strings first, then supplies, in the order of their parts.
  */
 export function blocksOf(netlist: Netlist): Block[] {
-  const rails = railsOf(netlist);
+  const rails = railsIn(netlist);
   const groups = joinAtCathodes(netlist, separate(netlist.parts, rails), rails);
   const blocks = groups.flatMap((parts) => splitAtFeed(netlist, parts, rails));
   return [

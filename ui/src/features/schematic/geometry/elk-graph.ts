@@ -3,7 +3,7 @@ import { type ElkExtendedEdge, type ElkNode } from 'elkjs/lib/elk-api';
 import { railSymbol, startFlag } from './draw-column';
 import { type Drawing, emptySketch, type Sketch, type Spot } from './drawing';
 import { finish } from './finish';
-import { otherEnd, partsByNode, railsOf } from '@/lib/bench/graph';
+import { otherEnd, partsByNode, railsIn } from '@/lib/bench/graph';
 import {
   drawPart,
   LABEL_GAP,
@@ -166,7 +166,7 @@ function drawNode(sketch: Sketch, netlist: Netlist, node: string, box: ElkNode):
   const y = box.y! + WIRE_Y;
   const x = box.x! + box.width! / 2;
   addLevel(sketch, node, { x: box.x!, y }, { x: box.x! + box.width!, y });
-  const isHot = railsOf(netlist).has(node);
+  const isHot = railsIn(netlist).has(node);
   if (isHot) sketch.rails.push(startFlag(node, { x: box.x!, y }));
   const label = textPlace(x, box.y! + 12, box.width!, NODE_LABEL_HEIGHT, 'middle');
   sketch.nodes.push({ node, spot: { x, y }, label });
@@ -183,5 +183,5 @@ function drawRail(
   const edge = { x: isBefore ? box.x! + box.width! : box.x!, y: spot.y };
   sketch.wires.push({ node, spots: [spot, edge] });
   const isNamed = node !== netlist.reference;
-  sketch.rails.push(railSymbol(node, spot, railsOf(netlist), isNamed, netlist.reference));
+  sketch.rails.push(railSymbol(node, spot, railsIn(netlist), isNamed, netlist.reference));
 }

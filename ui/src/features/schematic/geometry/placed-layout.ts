@@ -4,7 +4,7 @@ import { railSymbol } from './draw-column';
 import { type DrawnPart, type Drawing, emptySketch, type Sketch, type Spot } from './drawing';
 import { finish } from './finish';
 import { addNodeLabels } from './free-labels';
-import { railsOf } from '@/lib/bench/graph';
+import { railsIn } from '@/lib/bench/graph';
 import { drawPart } from './metrics';
 
 const ROW_PITCH = 140;
@@ -47,7 +47,7 @@ export function layoutAsPlaced(netlist: Netlist): Drawing {
     };
     sketch.parts.push(drawPart(part, place.x, place.y, place.turn));
   }
-  const rails = railsOf(netlist);
+  const rails = railsIn(netlist);
   const terminals = terminalsByNode(sketch.parts);
   for (const [node, spots] of terminals) {
     if (rails.has(node)) spots.forEach((at) => addRail(sketch, node, at, rails, netlist));

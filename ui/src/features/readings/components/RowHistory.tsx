@@ -1,0 +1,106 @@
+import { type Netlist } from '@engine/netlist/types';
+import {
+  Button,
+  makeStyles,
+  Popover,
+  PopoverSurface,
+  PopoverTrigger,
+  Spinner,
+  Text,
+  tokens,
+} from '@fluentui/react-components';
+import { HistoryRegular } from '@fluentui/react-icons';
+import { useState } from 'react';
+import { type CaseReading } from '@/lib/bench/case-reading';
+import { labelForReading, placeKey } from '@/lib/bench/places';
+import { problemInWords } from '@/lib/bench/problem';
+import { readingInWords } from '@/lib/bench/quantities';
+import { useReadingHistory } from '../api/get-reading-history';
+import { type GridRow } from '../grid/grid-model';
+
+interface RowHistoryProps {
+  caseId: string;
+  netlist: Netlist;
+  row: GridRow;
+  /** True in the row that the grid's focus is in, so that Tab goes on to it. */
+  isTabStop: boolean;
+}
+
+const useStyles = makeStyles({
+  button: { '@media (pointer: coarse)': { minWidth: '44px', minHeight: '44px' } },
+  surface: { maxWidth: 'min(340px, 90vw)', maxHeight: '50vh', overflowY: 'auto' },
+  list: { margin: 0, padding: 0, listStyleType: 'none' },
+  item: {
+    padding: `${tokens.spacingVerticalXS} 0`,
+    borderBottom: `1px solid ${tokens.colorNeutralStroke3}`,
+  },
+  value: { fontWeight: tokens.fontWeightSemibold, fontVariantNumeric: 'tabular-nums' },
+  past: { textDecorationLine: 'line-through', color: tokens.colorNeutralForeground3 },
+  note: {
+    display: 'block',
+    color: tokens.colorNeutralForeground3,
+    fontSize: tokens.fontSizeBase200,
+  },
+});
+
+/** All readings ever taken in one row, asked for when it is opened. */
+export function RowHistory({ caseId, netlist, row, isTabStop }: RowHistoryProps) {
+  const styles = useStyles();
+  const [isOpen, setIsOpen] = useState(false);
+  const history = useReadingHistory(caseId, isOpen);
+  const keys = new Set(Object.values(row.cells).map(placeKey));
+  const readings = (history.data ?? [])
+    .filter((reading) => keys.has(placeKey(reading)))
+    .sort((a, b) => (b.takenAt ?? '').localeCompare(a.takenAt ?? ''));
+
+  return (
+    <Popover open={isOpen} onOpenChange={(_event, { open }) => setIsOpen(open)} trapFocus>
+      <PopoverTrigger disableButtonEnhancement>
+        <Button
+          appearance="subtle"
+          size="small"
+          className={styles.button}
+          icon={<HistoryRegular />}
+          aria-label={`History of ${row.label}`}
+          tabIndex={isTabStop ? 0 : -1}
+        />
+      </PopoverTrigger>
+      <PopoverSurface className={styles.surface} aria-label={`History of ${row.label}`}>
+        {history.isPending ? (
+          <Spinner size="tiny" label="Looking it up" />
+        ) : history.isError ? (
+          <Text role="alert">{problemInWords(history.error)}</Text>
+        ) : readings.length === 0 ? (
+          <Text>Nothing has been read here yet.</Text>
+        ) : (
+          <ul className={styles.list}>
+            {readings.map((reading) => (
+              <li key={reading.id} className={styles.item}>
+                <span className={isPast(reading) ? styles.past : styles.value}>
+                  {readingInWords(reading)}
+                </span>{' '}
+                {labelForReading(netlist, reading)}
+                <span className={styles.note}>{noteOf(reading)}</span>
+              </li>
+            ))}
+          </ul>
+        )}
+      </PopoverSurface>
+    </Popover>
+  );
+}
+
+function isPast(reading: CaseReading): boolean {
+  return !!reading.replacedAt || !!reading.withdrawnAt;
+}
+
+function noteOf(reading: CaseReading): string {
+  const when = reading.takenAt
+    ? new Date(reading.takenAt).toLocaleString(undefined, {
+        dateStyle: 'medium',
+        timeStyle: 'short',
+      })
+    : '';
+  const state = reading.withdrawnAt ? 'taken back' : reading.replacedAt ? 'replaced later' : '';
+  return [reading.takenBy?.name, when, state].filter(Boolean).join(', ');
+}

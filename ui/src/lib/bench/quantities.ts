@@ -1,0 +1,24 @@
+import { type Take } from '@engine/netlist/types';
+import { formatQuantity } from '@engine/units';
+import { SEEN_WORDS, TAKE_WORDS } from './takes';
+import { type CaseReading } from './case-reading';
+
+/**
+ * Writes a value of a reading with its unit.
+ *
+ * @param value SI value, `OL` for over range, null or undefined for none.
+ * @param take kind of reading, which gives the unit.
+ * @returns "118.4 V", "4.7 kΩ", "OL", or "–" for none.
+ */
+export function takenInWords(value: number | 'OL' | null | undefined, take: Take): string {
+  if (value === 'OL') return 'OL';
+  const { unit } = TAKE_WORDS[take];
+  if (value === null || value === undefined || !unit) return '–';
+  return formatQuantity(value, unit, 4);
+}
+
+/** Writes what was read: a value with its unit, or what was seen. */
+export function readingInWords(reading: Pick<CaseReading, 'take' | 'value' | 'seen'>): string {
+  if (reading.seen) return SEEN_WORDS[reading.seen].word.toLowerCase();
+  return takenInWords(reading.value, reading.take);
+}
