@@ -18,18 +18,23 @@ export interface Conditional {
  * What further readings should show under one suspect, given the readings already taken: these
  * have told something about tolerances too, so the spread left is narrower than at first.
  *
- * @returns one entry per spec, or null when the set does not settle.
+ * @param specs the readings taken, in order, followed by the further ones.
+ * @returns one entry per further reading, or null when the set does not settle.
  */
 export function conditionOn(
   scorer: Scorer,
   set: ScoredSet,
   specs: readonly ReadingSpec[],
 ): Conditional[] | null {
-  const old = scorer.observations.filter(
-    ({ isOver, spec }, r) => !isOver && spec.take !== 'sign' && !set.bestLikelihood.slips[r],
-  );
-  const n = old.length;
-  const all = scorer.predict(set.best, [...old.map(({ spec }) => spec), ...specs]);
+  const { observations } = scorer;
+  const taken = observations
+    .map((_, r) => r)
+    .filter((r) => {
+      const { isOver, spec } = observations[r];
+      return !isOver && spec.take !== 'sign' && !set.bestLikelihood.slips[r];
+    });
+  const n = taken.length;
+  const all = scorer.predict(set.best, specs);
   if (!all) return null;
   const { width, sensitivity } = all;
   const sigmas = scorer.sigmasOf(set.best);
@@ -37,32 +42,33 @@ export function conditionOn(
   for (let at = 0; at < rows.length; at += width) {
     for (let p = 0; p < width; p += 1) rows[at + p] = sensitivity[at + p] * sigmas[p];
   }
-  const dot = (i: number, j: number): number => {
+  const dot = (x: number, y: number): number => {
     let sum = 0;
-    for (let p = 0; p < width; p += 1) sum += rows[i * width + p] * rows[j * width + p];
+    for (let p = 0; p < width; p += 1) sum += rows[x * width + p] * rows[y * width + p];
     return sum;
   };
   // Cholesky factor of the covariance of the readings taken, and their whitened residuals.
   const factor = new Float64Array(n * n);
   const white = new Float64Array(n);
   for (let i = 0; i < n; i += 1) {
+    const r = taken[i];
     for (let j = 0; j <= i; j += 1) {
-      let sum = dot(i, j);
-      if (i === j) sum += all.stray[i] + meterVariance(old[i].spec, all.shown[i]);
+      let sum = dot(r, taken[j]);
+      if (i === j) sum += all.stray[r] + meterVariance(specs[r], all.shown[r]);
       for (let k = 0; k < j; k += 1) sum -= factor[i * n + k] * factor[j * n + k];
       factor[i * n + j] = i === j ? Math.sqrt(Math.max(sum, 1e-18)) : sum / factor[j * n + j];
     }
-    let w = old[i].y - all.mean[i];
+    let w = observations[r].y - all.mean[r];
     for (let k = 0; k < i; k += 1) w -= factor[i * n + k] * white[k];
     white[i] = w / factor[i * n + i];
   }
   const shared = new Float64Array(n);
-  return specs.map((spec, c) => {
-    const r = n + c;
+  return specs.slice(observations.length).map((spec, c) => {
+    const r = observations.length + c;
     let mean = all.mean[r];
     let variance = dot(r, r) + all.stray[r];
     for (let i = 0; i < n; i += 1) {
-      let sum = dot(r, i);
+      let sum = dot(r, taken[i]);
       for (let k = 0; k < i; k += 1) sum -= factor[i * n + k] * shared[k];
       shared[i] = sum / factor[i * n + i];
       mean += shared[i] * white[i];

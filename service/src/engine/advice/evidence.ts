@@ -19,10 +19,7 @@ export interface ReadingView {
 /** Every reading by itself under one suspect; null when the suspect does not settle. */
 export function viewReadings(scorer: Scorer, set: ScoredSet): ReadingView[] | null {
   const { observations } = scorer;
-  const predictions = scorer.predict(
-    set.best,
-    observations.map(({ spec }) => spec),
-  );
+  const predictions = scorer.predict(set.best, scorer.specs);
   if (!predictions) return null;
   const sigmas = scorer.sigmasOf(set.best);
   const { width, sensitivity, stray, mean, shown } = predictions;

@@ -91,11 +91,12 @@ export function rateCandidates(
     .filter(({ probability }) => probability > LEAST_PROBABILITY);
   const total = suspects.reduce((sum, { probability }) => sum + probability, 0);
   const specs: ReadingSpec[] = listed.map((candidate) => specOf(circuit, candidate));
+  const both = [...scorer.observations.map(({ spec }) => spec), ...specs];
   const outlooks: Outlook[][] = listed.map(() => []);
   const weights: number[] = [];
   const kept: Ranked[] = [];
   for (const suspect of suspects) {
-    const predicted = conditionOn(scorer, suspect.set, specs);
+    const predicted = conditionOn(scorer, suspect.set, both);
     if (!predicted) continue;
     kept.push(suspect);
     weights.push(suspect.probability / total);

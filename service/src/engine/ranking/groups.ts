@@ -21,10 +21,9 @@ function spreadsOf(model: LikelihoodModel, count: number): Float64Array {
  */
 export function groupSets(scorer: Scorer, sets: readonly ScoredSet[]): number[] {
   const count = scorer.observations.length;
-  const specs = scorer.observations.map(({ spec }) => spec);
   const leaders: { set: ScoredSet; predictions: Predictions; spreads: Float64Array }[] = [];
   return sets.map((set) => {
-    const predictions = scorer.predict(set.best, specs);
+    const predictions = scorer.predict(set.best, scorer.specs);
     if (!predictions) return leaders.length + 1;
     const found = leaders.findIndex(({ set: leader, predictions: other, spreads }) => {
       if (Math.abs(set.logLikelihood - leader.logLikelihood) > SAME_LIKELIHOOD) return false;

@@ -46,7 +46,8 @@ export class Scorer {
   scored = 0;
   /** Fault sets that did not settle and were dropped. */
   dropped = 0;
-  private readonly specs: ReadingSpec[];
+  /** The case's readings by place; one list, since predictions are remembered for it. */
+  readonly specs: readonly ReadingSpec[];
   private readonly signs: Reading[];
   private readonly sigmas: Float64Array;
   /** Written over by every score, so that scoring allocates little. */
@@ -107,6 +108,20 @@ export class Scorer {
       this.spread[r] = Math.sqrt(this.likelihood.covariance[r * n + r]);
     }
     return { like, sigma: this.spread };
+  }
+
+  /**
+   * Scores a fault set with everything worked out for it alone; slow where a rectifier block is
+   * part of it, and the same as `score` where none is.
+   */
+  scoreExactly(faults: readonly SettledFault[]): Likelihood | null {
+    if (!this.predictor.waves) return this.score(faults);
+    const values = applyFaults(this.healthy, this.circuit, faults, this.values);
+    const predictions = this.predictor.predict(values, this.specs, faults, this.predictions, true);
+    if (!predictions) return null;
+    const result = this.likelihood.score(predictions, this.sigmasOf(faults));
+    if (this.signs.length > 0) result.log += signLog(this.predictor, values, faults, this.signs);
+    return result;
   }
 
   /** What the case's readings should be under a fault set, without spreads; false when it does not settle. */

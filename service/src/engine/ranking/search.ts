@@ -20,6 +20,8 @@ export interface SearchLimits {
   refined: number;
   /** Screened pairs that are scored in full. */
   pairs: number;
+  /** Sets scored once more with exact sensitivities, where a rectifier block is part of them. */
+  exact: number;
   /** Most faults in one set. */
   most: number;
   /** Most members of one cause whose subsets are all scored. */
@@ -30,6 +32,7 @@ export const SEARCH_LIMITS: SearchLimits = {
   extended: 8,
   refined: 8,
   pairs: 30,
+  exact: 20,
   most: 6,
   members: 8,
 };
@@ -76,6 +79,7 @@ export class Search {
       if (!next) break;
       this.extend(next);
     }
+    this.scoreBestExactly();
     const sets = [...this.sets.values()].sort(
       (x, y) => y.score - x.score || (x.key < y.key ? -1 : 1),
     );
@@ -213,6 +217,24 @@ export class Search {
       inner = logSumExp(again.logs) - again.like.log;
     });
     return { log: log + inner, start };
+  }
+
+  /** Scores the sets that matter once more, with nothing taken in proportion. */
+  private scoreBestExactly(): void {
+    if (!this.scorer.predictor.waves) return;
+    const best = this.best();
+    const sets = [...this.sets.values()]
+      .filter(({ score }) => score > best - FAR)
+      .sort((x, y) => y.score - x.score)
+      .slice(0, this.limits.exact);
+    for (const set of sets) {
+      const like = this.scorer.scoreExactly(set.best);
+      if (!like) continue;
+      const change = like.log - set.bestLikelihood.log;
+      set.bestLikelihood = like;
+      set.logLikelihood += change;
+      set.score += change;
+    }
   }
 
   /** Share of the probability that the screened but unscored combinations would hold. */

@@ -33,11 +33,9 @@ export class WavePredictor {
   private readonly healthy: BranchValues;
   private readonly scratch: BranchValues;
   private readonly moved: BranchValues;
-  private readonly means = new Map<string, Means | null>();
-  private readonly exact = new Map<string, Float64Array>();
   private readonly adjoint: Float64Array;
-  private specs: readonly ReadingSpec[] = [];
-  private rows: number[] = [];
+  private readonly lists = new WeakMap<readonly ReadingSpec[], ReadingList>();
+  private list: ReadingList = newList([], []);
 
   constructor(private readonly circuit: Circuit) {
     this.network = new WaveNetwork(circuit);
@@ -58,13 +56,18 @@ export class WavePredictor {
     return isInside(a) || isInside(b) || take === 'dc-volts' || take === 'ripple-volts';
   }
 
-  /** Readings that the next calls are about; forgets what was remembered for others. */
-  private about(specs: readonly ReadingSpec[]): void {
-    if (specs === this.specs) return;
-    this.specs = specs;
-    this.rows = specs.map((_, r) => r).filter((r) => this.isWave(specs[r]));
-    this.means.clear();
-    this.exact.clear();
+  /** Turns to a list of readings; what is remembered is remembered for each list by itself. */
+  private about(specs: readonly ReadingSpec[]): ReadingList {
+    if (specs === this.list.specs) return this.list;
+    const known = this.lists.get(specs);
+    this.list =
+      known ??
+      newList(
+        specs,
+        specs.map((_, r) => r).filter((r) => this.isWave(specs[r])),
+      );
+    this.lists.set(specs, this.list);
+    return this.list;
   }
 
   /**
@@ -79,20 +82,20 @@ export class WavePredictor {
     out: Predictions,
     isExact: boolean,
   ): boolean {
-    this.about(specs);
-    if (this.rows.length === 0) return true;
+    const { rows, exact: known } = this.about(specs);
+    if (rows.length === 0) return true;
     const own = this.inBlock(faults);
-    const means = this.meansOf(own);
+    const means = isExact || own.length < 2 ? this.meansOf(own) : this.combined(own);
     const base = this.meansOf([]);
     if (!means || !base) return false;
     const { circuit } = this;
     const width = circuit.parameters.length;
     const key = keyOf(own);
-    if (isExact && !this.exact.has(key)) this.exact.set(key, this.differences(own, means));
-    const exact = this.exact.get(key);
-    if (!this.exact.has('')) this.exact.set('', this.differences([], base));
-    const reference = this.exact.get('')!;
-    this.rows.forEach((r, i) => {
+    if (isExact && !known.has(key)) known.set(key, this.differences(own, means));
+    const exact = known.get(key);
+    if (!known.has('')) known.set('', this.differences([], base));
+    const reference = known.get('')!;
+    rows.forEach((r, i) => {
       out.mean[r] = means[i];
       out.shown[r] = means[i];
       const share = Math.abs(base[i]) > 1e-9 ? means[i] / base[i] : 0;
@@ -111,7 +114,7 @@ export class WavePredictor {
       const slope = this.slopeOf(fault);
       const alone = this.meansOf([fault]);
       if (!slope || !alone) return;
-      this.rows.forEach((r, i) => {
+      rows.forEach((r, i) => {
         const share = own.length === 1 ? 1 : Math.abs(alone[i]) > 1e-9 ? means[i] / alone[i] : 0;
         out.sensitivity[r * out.width + width + slot] = slope[i] * share;
       });
@@ -128,14 +131,14 @@ export class WavePredictor {
     faults: readonly SettledFault[],
     mean: Float64Array,
   ): boolean {
-    this.about(specs);
-    if (this.rows.length === 0) return true;
+    const { rows } = this.about(specs);
+    if (rows.length === 0) return true;
     const own = this.inBlock(faults);
     const base = this.meansOf([]);
     if (!base) return false;
     const singles = own.map((fault) => this.meansOf([fault]));
     if (singles.some((single) => !single)) return false;
-    this.rows.forEach((r, i) => {
+    rows.forEach((r, i) => {
       let value = base[i];
       for (const single of singles) {
         if (Math.abs(base[i]) > 1e-9) value *= single![i] / base[i];
@@ -144,6 +147,35 @@ export class WavePredictor {
       mean[r] = value;
     });
     return true;
+  }
+
+  /**
+   * Readings under several faults of the block: solved in full once for their parts and modes, and
+   * again where a value lies far from those solved; in between each fault acts in proportion.
+   */
+  private combined(faults: readonly SettledFault[]): Means | null {
+    const key = faults.map(({ part, mode }) => `${part}${mode}`).join('|');
+    const anchors = this.list.anchors.get(key) ?? [];
+    this.list.anchors.set(key, anchors);
+    const near = anchors.find((anchor) =>
+      faults.every((fault, i) => isNear(fault, anchor.faults[i])),
+    );
+    if (!near) {
+      const means = this.meansOf(faults);
+      if (means) anchors.push({ faults: faults.slice(), means });
+      return means;
+    }
+    const out = near.means.slice();
+    for (let f = 0; f < faults.length; f += 1) {
+      if (faults[f].value === near.faults[f].value) continue;
+      const now = this.meansOf([faults[f]]);
+      const then = this.meansOf([near.faults[f]]);
+      if (!now || !then) return null;
+      for (let i = 0; i < out.length; i += 1) {
+        if (Math.abs(then[i]) > 1e-9) out[i] *= now[i] / then[i];
+      }
+    }
+    return out;
   }
 
   private inBlock(faults: readonly SettledFault[]): SettledFault[] {
@@ -155,12 +187,13 @@ export class WavePredictor {
   /** Readings under some faults of the block, remembered. */
   private meansOf(faults: readonly SettledFault[]): Means | null {
     const key = keyOf(faults);
-    const known = this.means.get(key);
+    const { means: kept } = this.list;
+    const known = kept.get(key);
     if (known !== undefined) return known;
-    if (this.means.size > MOST_KEPT) this.means.clear();
+    if (kept.size > MOST_KEPT) kept.clear();
     const values = applyFaults(this.healthy, this.circuit, faults, this.scratch);
     const means = this.measure(values, 1);
-    this.means.set(key, means);
+    kept.set(key, means);
     return means;
   }
 
@@ -169,10 +202,10 @@ export class WavePredictor {
     const solution = this.network.solve(values, line);
     this.solved += 1;
     if (!solution) return null;
-    const out = new Float64Array(this.rows.length);
+    const out = new Float64Array(this.list.rows.length);
     let isLoaded = false;
-    this.rows.forEach((r, i) => {
-      const spec = this.specs[r];
+    this.list.rows.forEach((r, i) => {
+      const spec = this.list.specs[r];
       const open = readMeter(this.network, solution, spec, this.circuit);
       if (spec.take !== 'dc-volts') {
         out[i] = open;
@@ -217,7 +250,7 @@ export class WavePredictor {
   private differences(faults: readonly SettledFault[], base: Means): Float64Array {
     const { circuit } = this;
     const width = circuit.parameters.length;
-    const out = new Float64Array(this.rows.length * width);
+    const out = new Float64Array(this.list.rows.length * width);
     const values = applyFaults(this.healthy, circuit, faults);
     circuit.parameters.forEach((parameter, p) => {
       const by = STEP * parameter.sigma;
@@ -225,7 +258,7 @@ export class WavePredictor {
       if (!isMoved) return;
       const moved = this.measure(this.moved, line);
       if (!moved) return;
-      this.rows.forEach((_, i) => {
+      this.list.rows.forEach((_, i) => {
         out[i * width + p] = (moved[i] - base[i]) / by;
       });
     });
@@ -239,6 +272,37 @@ export class WavePredictor {
     if (!up || !down) return null;
     return Float64Array.from(up, (value, i) => (value - down[i]) / (2 * fault.width!));
   }
+}
+
+/** What is remembered for one list of readings. */
+interface ReadingList {
+  specs: readonly ReadingSpec[];
+  /** Places in the list of readings that belong to waveform blocks. */
+  rows: number[];
+  means: Map<string, Means | null>;
+  /** Sensitivities worked out in full, by fault. */
+  exact: Map<string, Float64Array>;
+  /** Combinations solved in full, by parts and modes; their neighbours are taken in proportion. */
+  anchors: Map<string, Anchor[]>;
+}
+
+function newList(specs: readonly ReadingSpec[], rows: number[]): ReadingList {
+  return { specs, rows, means: new Map(), exact: new Map(), anchors: new Map() };
+}
+
+/** A combination of faults solved in full. */
+interface Anchor {
+  faults: SettledFault[];
+  means: Means;
+}
+
+/** Cells between a value and one solved in full, within which proportion is good enough. */
+const NEAR_CELLS = 3.2;
+
+function isNear(x: SettledFault, y: SettledFault): boolean {
+  if (x.volts !== y.volts || x.amps !== y.amps) return false;
+  if (x.value === undefined || y.value === undefined) return true;
+  return Math.abs(Math.log(x.value / y.value)) <= NEAR_CELLS * Math.min(x.width!, y.width!);
 }
 
 /** The same fault with its value one cell further up or down. */

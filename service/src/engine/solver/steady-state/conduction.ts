@@ -43,8 +43,8 @@ export class Conduction {
 
   /** Exact steps of the states under this pattern. */
   get propagator(): Propagator {
-    const { block, step } = this.network;
-    this.made ??= new Propagator(block.states, this.a, this.b, block.omega, step);
+    const { block, clock } = this.network;
+    this.made ??= new Propagator(block.states, this.a, this.b, clock);
     return this.made;
   }
 

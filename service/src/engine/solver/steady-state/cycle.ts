@@ -47,7 +47,7 @@ export class CycleRunner {
 
   constructor(private readonly network: Network) {
     const { width, states, rectifiers } = network.block;
-    const room = 256;
+    const room = 128;
     this.trace = {
       count: 0,
       time: new Float64Array(room),
@@ -76,7 +76,8 @@ export class CycleRunner {
    */
   run(x0: Float64Array, monodromy?: Float64Array): Trace {
     const { network, trace, start, trial } = this;
-    const { block, step } = network;
+    const { block, clock } = network;
+    const { step } = clock;
     const { states, period, rectifiers } = block;
     this.isRough = false;
     let switchings = 0;

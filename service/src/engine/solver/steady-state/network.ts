@@ -2,6 +2,7 @@ import { type BranchLaws, branchLaws, chokeShare } from './branch-law';
 import { Conduction } from './conduction';
 import { type ElementOf, LIMITS } from './elements';
 import { Elimination } from './elimination';
+import { StepClock } from './propagator';
 import type { Topology } from './topology';
 
 /**
@@ -17,11 +18,14 @@ export class Network {
   private readonly baseRhs: Float64Array;
   private readonly index = new Map<number, number>();
 
+  readonly clock: StepClock;
+
   /** @param step longest step in seconds. */
   constructor(
     readonly block: Topology,
-    readonly step: number,
+    step: number,
   ) {
+    this.clock = new StepClock(block.omega, step);
     this.laws = branchLaws(block);
     this.base = new Elimination(block.unknowns, LIMITS.leastSiemens);
     this.work = new Elimination(block.unknowns, LIMITS.leastSiemens);

@@ -1,6 +1,29 @@
 /** Terms of the Taylor series; with a norm below 1/4 the rest is under 1e-14. */
 const TERMS = 10;
 const SMALL_NORM = 0.25;
+const MOST_HALVINGS = 60;
+
+/** Halves, quarters … of a step and how far the drive turns in each; shared by all propagators. */
+export class StepClock {
+  readonly length = new Float64Array(MOST_HALVINGS + 1);
+  readonly sin = new Float64Array(MOST_HALVINGS + 1);
+  readonly cos = new Float64Array(MOST_HALVINGS + 1);
+
+  /**
+   * @param omega angular frequency of the drive.
+   * @param step longest length of time in seconds.
+   */
+  constructor(
+    readonly omega: number,
+    readonly step: number,
+  ) {
+    for (let level = 0; level <= MOST_HALVINGS; level += 1) {
+      this.length[level] = step * 2 ** -level;
+      this.sin[level] = Math.sin(omega * this.length[level]);
+      this.cos[level] = Math.cos(omega * this.length[level]);
+    }
+  }
+}
 
 /**
  * Exact solution of x' = A·x + B·(sin ωt, cos ωt, 1) over any length of time up to one step.
@@ -12,27 +35,25 @@ const SMALL_NORM = 0.25;
  */
 export class Propagator {
   private readonly halvings: number;
-  /** Per level: states×states increments. */
-  private readonly own: Float64Array[] = [];
-  /** Per level: states×3 answers to sine, cosine and one. */
-  private readonly driven: Float64Array[] = [];
+  /** Level after level: states×states increments. */
+  private readonly own: Float64Array;
+  /** Level after level: states×3 answers to sine, cosine and one. */
+  private readonly driven: Float64Array;
   /** Increments over 2, 4, 8 … steps, made when asked for. */
   private readonly doublings: Float64Array[] = [];
-  private readonly turn: { sin: number; cos: number; length: number }[] = [];
   private readonly scratch: Float64Array;
   private readonly term: Float64Array;
 
   /**
    * @param a A, n×n by rows.
    * @param b B, n×3 by rows.
-   * @param step longest length of time in seconds.
+   * @param clock the drive's frequency and the longest length of time.
    */
   constructor(
     readonly n: number,
     readonly a: Float64Array,
     readonly b: Float64Array,
-    private readonly omega: number,
-    readonly step: number,
+    private readonly clock: StepClock,
   ) {
     let norm = 0;
     for (let i = 0; i < n; i += 1) {
@@ -40,16 +61,12 @@ export class Propagator {
       for (let j = 0; j < n; j += 1) sum += Math.abs(a[i * n + j]);
       if (sum > norm) norm = sum;
     }
-    const wanted = Math.ceil(Math.log2((norm * step) / SMALL_NORM));
-    this.halvings = Number.isFinite(wanted) ? Math.min(Math.max(wanted, 0), 60) : 0;
+    const wanted = Math.ceil(Math.log2((norm * clock.step) / SMALL_NORM));
+    this.halvings = Number.isFinite(wanted) ? Math.min(Math.max(wanted, 0), MOST_HALVINGS) : 0;
     this.scratch = new Float64Array(n);
     this.term = new Float64Array(n);
-    for (let level = 0; level <= this.halvings; level += 1) {
-      const length = step * 2 ** -level;
-      this.turn.push({ sin: Math.sin(omega * length), cos: Math.cos(omega * length), length });
-      this.own.push(new Float64Array(n * n));
-      this.driven.push(new Float64Array(n * 3));
-    }
+    this.own = new Float64Array((this.halvings + 1) * n * n);
+    this.driven = new Float64Array((this.halvings + 1) * n * 3);
     this.series();
     for (let level = this.halvings; level > 0; level -= 1) this.square(level);
   }
@@ -63,34 +80,35 @@ export class Propagator {
    * @param cos cos ωt at the start.
    */
   advance(x: Float64Array, length: number, sin: number, cos: number): void {
-    if (length === this.step) {
+    if (length === this.clock.step) {
       this.apply(0, x, 0, sin, cos, 1);
       return;
     }
+    const { clock } = this;
     let left = length;
     for (let level = 1; level <= this.halvings; level += 1) {
-      const turn = this.turn[level];
-      if (left < turn.length) continue;
+      const part = clock.length[level];
+      if (left < part) continue;
       this.apply(level, x, 0, sin, cos, 1);
-      const next = sin * turn.cos + cos * turn.sin;
-      cos = cos * turn.cos - sin * turn.sin;
+      const next = sin * clock.cos[level] + cos * clock.sin[level];
+      cos = cos * clock.cos[level] - sin * clock.sin[level];
       sin = next;
-      left -= turn.length;
+      left -= part;
     }
     this.rest(x, 0, left, sin, cos, 1);
   }
 
   /** Moves a deviation on in place: the same without any drive. `at` is its place in `x`. */
   carry(x: Float64Array, at: number, length: number): void {
-    if (length === this.step) {
+    if (length === this.clock.step) {
       this.apply(0, x, at, 0, 0, 0);
       return;
     }
     let left = length;
     for (let level = 1; level <= this.halvings; level += 1) {
-      if (left < this.turn[level].length) continue;
+      if (left < this.clock.length[level]) continue;
       this.apply(level, x, at, 0, 0, 0);
-      left -= this.turn[level].length;
+      left -= this.clock.length[level];
     }
     this.rest(x, at, left, 0, 0, 0);
   }
@@ -103,20 +121,21 @@ export class Propagator {
    * @param m n×n, column after column.
    */
   carryAll(m: Float64Array, length: number): void {
-    const { n, step, halvings } = this;
+    const { n, halvings, clock } = this;
+    const { step } = clock;
     let left = length;
     let top = 0;
     while (left >= step * 2 ** (top + 1)) top += 1;
     for (let double = top; double >= 0; double -= 1) {
       const part = step * 2 ** double;
       if (left < part) continue;
-      this.multiply(double === 0 ? this.own[0] : this.doubling(double), m);
+      this.multiply(double === 0 ? this.own : this.doubling(double), 0, m);
       left -= part;
     }
     for (let level = 1; level <= halvings; level += 1) {
-      if (left < this.turn[level].length) continue;
-      this.multiply(this.own[level], m);
-      left -= this.turn[level].length;
+      if (left < clock.length[level]) continue;
+      this.multiply(this.own, level * n * n, m);
+      left -= clock.length[level];
     }
     if (left <= 0) return;
     const rest = new Float64Array(n * n);
@@ -127,14 +146,14 @@ export class Propagator {
         rest[i * n + j] = left * (this.a[i * n + j] + (left / 2) * sum);
       }
     }
-    this.multiply(rest, m);
+    this.multiply(rest, 0, m);
   }
 
   /** Increment over 2^k steps. */
   private doubling(k: number): Float64Array {
     const { n, doublings } = this;
     for (let have = doublings.length; have < k; have += 1) {
-      const half = have === 0 ? this.own[0] : doublings[have - 1];
+      const half = have === 0 ? this.own : doublings[have - 1];
       const whole = new Float64Array(n * n);
       for (let i = 0; i < n; i += 1) {
         for (let j = 0; j < n; j += 1) {
@@ -149,10 +168,10 @@ export class Propagator {
   }
 
   /** m ← (1 + increment)·m, m stored column after column. */
-  private multiply(increment: Float64Array, m: Float64Array): void {
+  private multiply(increment: Float64Array, from: number, m: Float64Array): void {
     const { n, scratch } = this;
     for (let at = 0; at < n * n; at += n) {
-      for (let i = 0, p = 0; i < n; i += 1) {
+      for (let i = 0, p = from; i < n; i += 1) {
         let sum = m[at + i];
         for (let j = 0; j < n; j += 1, p += 1) sum += increment[p] * m[at + j];
         scratch[i] = sum;
@@ -169,11 +188,11 @@ export class Propagator {
     cos: number,
     one: number,
   ): void {
-    const { n, scratch } = this;
-    const own = this.own[level];
-    const driven = this.driven[level];
-    for (let i = 0, p = 0; i < n; i += 1) {
-      let sum = driven[i * 3] * sin + driven[i * 3 + 1] * cos + driven[i * 3 + 2] * one;
+    const { n, scratch, own, driven } = this;
+    let p = level * n * n;
+    let d = level * n * 3;
+    for (let i = 0; i < n; i += 1, d += 3) {
+      let sum = driven[d] * sin + driven[d + 1] * cos + driven[d + 2] * one;
       for (let j = 0; j < n; j += 1, p += 1) sum += own[p] * x[at + j];
       scratch[i] = sum;
     }
@@ -190,7 +209,8 @@ export class Propagator {
     one: number,
   ): void {
     if (length <= 0) return;
-    const { n, a, b, scratch, term, omega } = this;
+    const { n, a, b, scratch, term } = this;
+    const { omega } = this.clock;
     for (let i = 0; i < n; i += 1) term[i] = x[at + i];
     for (let k = 1; k <= TERMS; k += 1) {
       const factor = length / k;
@@ -216,8 +236,9 @@ export class Propagator {
 
   /** Fills the shortest level: Horner's scheme on the series of the driven system. */
   private series(): void {
-    const { n, a, b, omega, halvings } = this;
-    const t = this.turn[halvings].length;
+    const { n, a, b, halvings, clock } = this;
+    const { omega } = clock;
+    const t = clock.length[halvings];
     let x = new Float64Array(n * n);
     let y = new Float64Array(n * 3);
     let nextX = new Float64Array(n * n);
@@ -258,38 +279,40 @@ export class Propagator {
       [x, nextX] = [nextX, x];
       [y, nextY] = [nextY, y];
     }
-    this.own[halvings].set(x);
-    this.driven[halvings].set(y);
+    this.own.set(x, halvings * n * n);
+    this.driven.set(y, halvings * n * 3);
   }
 
   /** Fills the level above from this one: twice the length. */
   private square(level: number): void {
-    const { n } = this;
-    const own = this.own[level];
-    const driven = this.driven[level];
-    const { sin, cos } = this.turn[level];
-    const ownTwice = this.own[level - 1];
-    const drivenTwice = this.driven[level - 1];
+    const { n, own, driven, clock } = this;
+    const sin = clock.sin[level];
+    const cos = clock.cos[level];
+    const o = level * n * n;
+    const d = level * n * 3;
+    const up = o - n * n;
+    const upDriven = d - n * 3;
     for (let i = 0; i < n; i += 1) {
       for (let j = 0; j < n; j += 1) {
-        let sum = 2 * own[i * n + j];
-        for (let m = 0; m < n; m += 1) sum += own[i * n + m] * own[m * n + j];
-        ownTwice[i * n + j] = sum;
+        let sum = 2 * own[o + i * n + j];
+        for (let m = 0; m < n; m += 1) sum += own[o + i * n + m] * own[o + m * n + j];
+        own[up + i * n + j] = sum;
       }
-      const d0 = driven[i * 3];
-      const d1 = driven[i * 3 + 1];
-      const d2 = driven[i * 3 + 2];
+      const d0 = driven[d + i * 3];
+      const d1 = driven[d + i * 3 + 1];
+      const d2 = driven[d + i * 3 + 2];
       let toSin = d0 + d0 * cos - d1 * sin;
       let toCos = d1 + d0 * sin + d1 * cos;
       let toOne = d2 + d2;
       for (let m = 0; m < n; m += 1) {
-        toSin += own[i * n + m] * driven[m * 3];
-        toCos += own[i * n + m] * driven[m * 3 + 1];
-        toOne += own[i * n + m] * driven[m * 3 + 2];
+        const factor = own[o + i * n + m];
+        toSin += factor * driven[d + m * 3];
+        toCos += factor * driven[d + m * 3 + 1];
+        toOne += factor * driven[d + m * 3 + 2];
       }
-      drivenTwice[i * 3] = toSin;
-      drivenTwice[i * 3 + 1] = toCos;
-      drivenTwice[i * 3 + 2] = toOne;
+      driven[upDriven + i * 3] = toSin;
+      driven[upDriven + i * 3 + 1] = toCos;
+      driven[upDriven + i * 3 + 2] = toOne;
     }
   }
 }

@@ -5,7 +5,7 @@ import { solveDense } from './dense';
 export type SlowElement = ElementOf<'load'> | ElementOf<'hot'> | ElementOf<'ntc'>;
 
 /** A load below this share of its rated voltage keeps the conductance it has there. */
-const LEAST_SHARE = 1e-6;
+const LEAST_SHARE = 1e-3;
 
 /** Conductance and its slope d ln(siemens)/d ln(volts), volts being average (load) or RMS. */
 export interface SlowPoint {
@@ -94,14 +94,5 @@ export class SlowSearch {
     const largest = step.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
     const damping = largest > 2 ? 2 / largest : 1;
     return z.map((value, i) => value + damping * step[i]);
-  }
-
-  /** Forgets what was learnt, after a step that was no improvement. */
-  reset(): void {
-    const { n, jacobian } = this;
-    jacobian.fill(0);
-    for (let i = 0; i < n; i += 1) jacobian[i * n + i] = -1;
-    this.lastZ = undefined;
-    this.lastR = undefined;
   }
 }

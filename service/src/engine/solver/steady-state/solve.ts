@@ -1,25 +1,35 @@
 import { CycleRunner } from './cycle';
-import { solveDense } from './dense';
-import type { BranchElement } from './elements';
-import { gatherGram, momentsOf } from './gram';
+import { gatherGram, type Gram, momentsOf } from './gram';
 import { Network } from './network';
+import { ShootingSearch } from './newton';
 import { ratedSiemens, type SlowElement, slowPoint, SlowSearch } from './slow-parts';
+import type { BranchElement } from './elements';
 import { SteadyState, type WarmStart } from './steady-state';
 import { compileBlock, type Topology } from './topology';
 
 /** How a block is solved. */
 export interface SolveOptions {
-  /** Steps per cycle: where rectifiers are looked at. Default 64. */
+  /** Steps per cycle: where rectifiers are looked at. Default 64, more when a choke rings faster. */
   steps?: number;
   /** A solved neighbour: the same nodes, elements mostly at the same places in the list. */
   start?: SteadyState | WarmStart;
   /** Size of the last Newton step, as a fraction of the largest source voltage. Default 1e-6. */
   tolerance?: number;
-  /** Cycles before giving up. Default 80. */
+  /** Cycles before giving up. Default 100. */
   mostCycles?: number;
 }
 
+/** Relative change of a slow part's conductance that counts as settled. */
 const SLOW_TOLERANCE = 1e-7;
+const STEPS = 64;
+const MOST_STEPS = 512;
+/** Newton steps above this fraction of scale say little about averages yet. */
+const FAR = 0.3;
+/** From this cycle on slow parts move by half of what their law asks for. */
+const PATIENCE = 20;
+/** After this many cycles one that repeats this well, as a fraction of scale, is good enough. */
+const LAST_RESORT = 60;
+const REPEATS = 1e-7;
 
 /**
  * Periodic steady state of a block with rectifiers.
@@ -44,88 +54,63 @@ export function solveSteadyState(
   options: SolveOptions = {},
 ): SteadyState {
   const block = compileBlock(elements, nodes, hertz);
-  const network = new Network(block, block.period / (options.steps ?? 64));
+  const network = new Network(block, block.period / (options.steps ?? stepsFor(block)));
   const runner = new CycleRunner(network);
-  const tolerance = options.tolerance ?? 1e-6;
-  const mostCycles = options.mostCycles ?? 80;
+  const tolerance = (options.tolerance ?? 1e-6) * block.scale;
+  const mostCycles = options.mostCycles ?? 100;
   const start = options.start instanceof SteadyState ? options.start.warmStart : options.start;
-  const { states } = block;
   const x0 = firstStates(block, start);
   let z = firstSlow(block, start);
-  const search = new SlowSearch(z.length);
-  const weights = stateWeights(block);
-  const monodromy = new Float64Array(states * states);
+  const slow = new SlowSearch(z.length);
+  const search = new ShootingSearch(block.states, stateWeights(block));
+  const monodromy = new Float64Array(block.states * block.states);
+  const hasSlow = z.length > 0;
 
   for (let cycle = 1; ; cycle += 1) {
-    if (z.length > 0 || cycle === 1) network.setSlow(z.map(Math.exp));
+    if (hasSlow || cycle === 1) network.setSlow(z.map(Math.exp));
     runner.run(x0, monodromy);
-    const step = newtonStep(x0, runner.end, monodromy, states);
-    const size = largestOf(step, weights) / block.scale;
-    const isSmall = size <= tolerance;
+    search.observe(x0, runner.end, monodromy);
+    const change = search.measure(runner.end.map((end, i) => end - x0[i]));
+    const isClose =
+      search.size <= tolerance || (cycle > LAST_RESORT && change <= REPEATS * block.scale);
     const isLast = cycle >= mostCycles;
-    const isNear = size < 0.3;
-    if (step && isNear && (isSmall || z.length > 0)) runner.correct(step);
-    let miss = 0;
-    if (z.length > 0 && (isNear || isLast)) {
-      const gram = gatherGram(network, runner.trace);
-      const r = slowMiss(network, gram, z);
-      miss = r.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
-      if (!(isSmall && miss <= SLOW_TOLERANCE) && !isLast) z = search.next(z, r);
-      else
-        return new SteadyState(
-          network,
-          runner.trace,
-          isSmall && miss <= SLOW_TOLERANCE,
-          cycle,
-          gram,
-        );
-    } else if (isSmall || isLast) {
-      return new SteadyState(
-        network,
-        runner.trace,
-        isSmall,
-        cycle,
-        gatherGram(network, runner.trace),
-      );
+    let isSettled = true;
+    let gram: Gram | undefined;
+    if (hasSlow && search.size < FAR * block.scale) {
+      runner.correct(search.step);
+      gram = gatherGram(network, runner.trace);
+      const miss = slowMiss(network, gram, z);
+      isSettled = miss.every((value) => Math.abs(value) <= SLOW_TOLERANCE);
+      if (!isSettled && !isLast) {
+        z = cycle > PATIENCE ? z.map((value, i) => value + 0.5 * miss[i]) : slow.next(z, miss);
+      }
+    } else if (isClose && search.size <= tolerance) {
+      runner.correct(search.step);
     }
-    moveStates(x0, step, runner.end, cycle);
+    if ((isClose && isSettled) || isLast) {
+      gram ??= gatherGram(network, runner.trace);
+      return new SteadyState(network, runner.trace, isClose && isSettled, cycle, gram);
+    }
+    search.next(x0, runner.end);
   }
 }
 
-/** Newton's step on the start states; nothing when the linear system is singular. */
-function newtonStep(
-  x0: Float64Array,
-  end: Float64Array,
-  monodromy: Float64Array,
-  n: number,
-): Float64Array | undefined {
-  const matrix = new Float64Array(n * n);
-  const step = new Float64Array(n);
-  for (let i = 0; i < n; i += 1) {
-    step[i] = end[i] - x0[i];
-    for (let j = 0; j < n; j += 1) matrix[i * n + j] = (i === j ? 1 : 0) - monodromy[j * n + i];
+/** Enough steps to see the fastest ringing of a choke with a capacitor beside it. */
+function stepsFor(block: Topology): number {
+  let fastest = 0;
+  for (const k of block.stateElement) {
+    const choke = block.elements[k];
+    if (choke.kind !== 'inductor') continue;
+    for (const other of block.stateElement) {
+      const capacitor = block.elements[other];
+      if (capacitor.kind !== 'capacitor') continue;
+      const ends = [capacitor.a, capacitor.b].filter((node) => node !== 0);
+      if (!ends.includes(choke.a) && !ends.includes(choke.b)) continue;
+      fastest = Math.max(fastest, 1 / Math.sqrt(Math.max(choke.henries, 1e-9) * capacitor.farads));
+    }
   }
-  if (!solveDense(matrix, step, n)) return undefined;
-  return step.every(Number.isFinite) ? step : undefined;
-}
-
-/**
- * Takes the Newton step. Should it not settle, full steps are followed by a halved one and by a
- * plain cycle in turn, which breaks any circle Newton goes round in.
- */
-function moveStates(
-  x0: Float64Array,
-  step: Float64Array | undefined,
-  end: Float64Array,
-  cycle: number,
-): void {
-  const turn = cycle > 20 ? cycle % 3 : 0;
-  if (!step || turn === 1) {
-    x0.set(end);
-    return;
-  }
-  const factor = turn === 2 ? 0.5 : 1;
-  for (let i = 0; i < x0.length; i += 1) x0[i] += factor * step[i];
+  const wanted = Math.ceil(2 * fastest * block.period);
+  return Math.min(Math.max(wanted, STEPS), MOST_STEPS);
 }
 
 /** Volts that one unit of each state stands for: chokes count with their reactance. */
@@ -136,21 +121,8 @@ function stateWeights(block: Topology): Float64Array {
   });
 }
 
-function largestOf(step: Float64Array | undefined, weights: Float64Array): number {
-  if (!step) return Infinity;
-  let largest = 0;
-  for (let i = 0; i < step.length; i += 1) {
-    largest = Math.max(largest, Math.abs(step[i]) * weights[i]);
-  }
-  return largest;
-}
-
 /** ln of what each slow part's law asks for, less ln of the conductance the cycle was run with. */
-function slowMiss(
-  network: Network,
-  gram: ReturnType<typeof gatherGram>,
-  z: Float64Array,
-): Float64Array {
+function slowMiss(network: Network, gram: Gram, z: Float64Array): Float64Array {
   const { block } = network;
   const rows = new Float64Array(network.met.length * block.width);
   return z.map((value, i) => {
