@@ -142,7 +142,7 @@ describe('heater strings', () => {
         const values = healthyValues(circuit);
         spoil(values, k);
         expect(rms.solve(values)).toBe(true);
-        circuit.nodes.forEach((node, index) => {
+        circuit.nodes.forEach((_, index) => {
           if (index === circuit.hot || index === circuit.return) return;
           let sum = 0;
           circuit.branches.forEach(({ a, b }, branch) => {

@@ -93,22 +93,30 @@ export class Conduction {
   }
 
   /**
-   * Current of a source without resistance, by Kirchhoff's current law on the side of its tie that
-   * does not hold the reference.
+   * Elements whose currents add up to that of a source without resistance, by Kirchhoff's current
+   * law on the side of its tie that does not hold the reference.
    */
-  private idealSourceRow(k: number, row: Float64Array): Float64Array {
+  termsOf(k: number): { element: number; factor: number }[] {
     const { block } = this.network;
     const side = this.sideOf(k);
     const sign = side.has(block.elements[k].a) ? -1 : 1;
-    const one = new Float64Array(block.width);
-    row.fill(0);
+    const terms: { element: number; factor: number }[] = [];
     block.elements.forEach((element, other) => {
       if (other === k || block.isIdeal[other]) return;
       const leaves = (side.has(element.a) ? 1 : 0) - (side.has(element.b) ? 1 : 0);
-      if (leaves === 0) return;
-      this.currentRow(other, one);
-      for (let c = 0; c < block.width; c += 1) row[c] += sign * leaves * one[c];
+      if (leaves !== 0) terms.push({ element: other, factor: sign * leaves });
     });
+    return terms;
+  }
+
+  private idealSourceRow(k: number, row: Float64Array): Float64Array {
+    const { width } = this.network.block;
+    const one = new Float64Array(width);
+    row.fill(0);
+    for (const { element, factor } of this.termsOf(k)) {
+      this.currentRow(element, one);
+      for (let c = 0; c < width; c += 1) row[c] += factor * one[c];
+    }
     return row;
   }
 

@@ -1,5 +1,6 @@
 import type { Trace } from './cycle';
 import type { Network } from './network';
+import { runsOf } from './runs';
 
 /**
  * Mean over the cycle of the products ξ̃ᵢ·ξ̃ⱼ while each pattern held, ξ̃ being ξ with the states
@@ -49,20 +50,14 @@ export function gatherGram(network: Network, trace: Trace): Gram {
       for (let j = 0; j <= i; j += 1) into[i * width + j] += left * xi[j] + right * rate[j];
     }
   };
-  // Runs of equal steps under one pattern: the end derivatives of neighbours cancel.
-  for (let k = 0; k + 1 < trace.count;) {
-    const which = trace.which[k];
-    const length = trace.length[k];
-    let end = k + 1;
-    while (end + 1 < trace.count && trace.which[end] === which && trace.length[end] === length)
-      end += 1;
-    const into = products[which];
-    const weight = length / period;
-    const ends = (length * weight) / 12;
-    add(into, k, weight / 2, ends, which);
-    for (let m = k + 1; m < end; m += 1) add(into, m, weight, 0, which);
-    add(into, end, weight / 2, -ends, which);
-    k = end;
+  for (const run of runsOf(trace)) {
+    const into = products[run.which];
+    const weight = run.length / period;
+    // Within a run the end derivatives of neighbours cancel.
+    const ends = (run.length * weight) / 12;
+    add(into, run.from, weight / 2, ends, run.which);
+    for (let k = run.from + 1; k < run.to; k += 1) add(into, k, weight, 0, run.which);
+    add(into, run.to, weight / 2, -ends, run.which);
   }
   for (const product of products) {
     for (let i = 0; i < width; i += 1) {

@@ -34,7 +34,8 @@ export class StepClock {
  * instead of e^{At}, so that a slow decay beside a fast one keeps its digits.
  */
 export class Propagator {
-  private readonly halvings: number;
+  /** Level of the shortest length kept. */
+  readonly halvings: number;
   /** Level after level: states×states increments. */
   private readonly own: Float64Array;
   /** Level after level: states×3 answers to sine, cosine and one. */
@@ -53,7 +54,7 @@ export class Propagator {
     readonly n: number,
     readonly a: Float64Array,
     readonly b: Float64Array,
-    private readonly clock: StepClock,
+    readonly clock: StepClock,
   ) {
     let norm = 0;
     for (let i = 0; i < n; i += 1) {
@@ -111,6 +112,11 @@ export class Propagator {
       left -= this.clock.length[level];
     }
     this.rest(x, at, left, 0, 0, 0);
+  }
+
+  /** Moves a deviation on by one level's length. */
+  carryLevel(x: Float64Array, at: number, level: number): void {
+    this.apply(level, x, at, 0, 0, 0);
   }
 
   /**

@@ -51,6 +51,35 @@ export function slowPoint(element: SlowElement, volts: number, siemens: number):
 }
 
 /**
+ * Derivative of ln(siemens) by the logarithm of one of the part's own figures, at fixed voltage and
+ * current.
+ *
+ * @param volts what the law was last asked with, average (load) or RMS.
+ */
+export function slowDerivative(
+  element: SlowElement,
+  field: string,
+  volts: number,
+  siemens: number,
+): number {
+  const { slope } = slowPoint(element, volts, siemens);
+  const { exponent } = element;
+  if (element.kind === 'ntc') {
+    const amps = Math.max(Math.abs(volts) * siemens, 1e-15);
+    if (slope === 0) {
+      return field === (1 / siemens > element.hotOhms ? 'coldOhms' : 'hotOhms') ? -1 : 0;
+    }
+    if (field === 'hotOhms') return -1;
+    if (field === 'amps') return exponent;
+    return field === 'exponent' ? -exponent * Math.log(amps / element.amps) : 0;
+  }
+  if (field === 'amps') return 1;
+  if (field === 'volts') return -1 - slope;
+  if (slope === 0) return field === 'coldRatio' && element.kind === 'hot' ? 1 : 0;
+  return field === 'exponent' ? exponent * Math.log(Math.abs(volts) / element.volts) : 0;
+}
+
+/**
  * Root finder for the logarithms of the slow parts' conductances: C. Broyden, Mathematics of
  * Computation 19 (1965) 577-593, first method, begun as a plain fixed point.
  */

@@ -89,7 +89,7 @@ export function solveSteadyState(
     }
     if ((isClose && isSettled) || isLast) {
       gram ??= gatherGram(network, runner.trace);
-      return new SteadyState(network, runner.trace, isClose && isSettled, cycle, gram);
+      return new SteadyState(network, runner.trace, isClose && isSettled, cycle, gram, monodromy);
     }
     search.next(x0, runner.end);
   }
