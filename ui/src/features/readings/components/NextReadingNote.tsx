@@ -2,7 +2,7 @@ import { type NextReading } from '@engine/diagnosis-types';
 import { type Netlist } from '@engine/netlist/types';
 import { Button, makeStyles, Text, tokens } from '@fluentui/react-components';
 import { ArrowRightRegular } from '@fluentui/react-icons';
-import { nextReadingInWords } from '../entry/next-reading-words';
+import { nextInWords, whyInWords } from '@/lib/bench/next-words';
 
 interface NextReadingNoteProps {
   netlist: Netlist;
@@ -33,9 +33,9 @@ export function NextReadingNote({ netlist, next, onGo }: NextReadingNoteProps) {
   return (
     <div className={styles.root} role="note" aria-label="Next reading">
       <div className={styles.words}>
-        <Text weight="semibold">Next: {nextReadingInWords(netlist, next)}</Text>
+        <Text weight="semibold">Next: {nextInWords(netlist, next)}</Text>
         <Text size={200} className={styles.why}>
-          {sentence(next.why)}
+          {whyInWords(next)}
         </Text>
       </div>
       <Button
@@ -48,13 +48,4 @@ export function NextReadingNote({ netlist, next, onGo }: NextReadingNoteProps) {
       </Button>
     </div>
   );
-}
-
-function sentence(text: string): string {
-  const words = text.trim();
-  if (words === '') return '';
-  const capital = words[0].toUpperCase() + words.slice(1);
-  // "tells R1B open …" begins with a verb and needs its subject.
-  const whole = /^tells /i.test(words) ? `It ${words}` : capital;
-  return /[.!?]$/.test(whole) ? whole : `${whole}.`;
 }

@@ -18,6 +18,7 @@ const useStyles = makeStyles({
   },
   key: {
     minWidth: 0,
+    maxWidth: 'none',
     minHeight: '56px',
     fontSize: tokens.fontSizeBase500,
     fontVariantNumeric: 'tabular-nums',

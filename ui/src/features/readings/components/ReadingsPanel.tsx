@@ -113,7 +113,6 @@ export function ReadingsPanel(props: ReadingsPanelProps) {
       <div className={styles.bar}>
         <MeterPicker meterId={meterId} onChoose={setMeterId} />
         <Button
-          size="small"
           icon={<ArrowUndoRegular />}
           disabled={!entry.canUndo}
           className={styles.touch}
@@ -122,7 +121,6 @@ export function ReadingsPanel(props: ReadingsPanelProps) {
           Undo
         </Button>
         <Button
-          size="small"
           icon={isBench ? <TableRegular /> : <CalculatorRegular />}
           className={styles.touch}
           onClick={() => setMode(isBench ? 'grid' : 'bench')}

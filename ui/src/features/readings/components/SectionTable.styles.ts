@@ -3,7 +3,7 @@ import { makeStyles, tokens } from '@fluentui/react-components';
 /** Styles of the readings' grid. */
 export const useSectionTableStyles = makeStyles({
   scroll: { overflowX: 'auto', maxWidth: '100%' },
-  table: { borderCollapse: 'collapse', width: '100%', fontSize: tokens.fontSizeBase300 },
+  table: { borderCollapse: 'collapse', fontSize: tokens.fontSizeBase300 },
   head: {
     padding: `${tokens.spacingVerticalXS} ${tokens.spacingHorizontalS}`,
     textAlign: 'right',
@@ -17,6 +17,7 @@ export const useSectionTableStyles = makeStyles({
     position: 'sticky',
     left: 0,
     zIndex: 1,
+    width: '190px',
     minWidth: '116px',
     maxWidth: '190px',
     padding: `${tokens.spacingVerticalXXS} ${tokens.spacingHorizontalS} ${tokens.spacingVerticalXXS} 0`,
@@ -33,7 +34,8 @@ export const useSectionTableStyles = makeStyles({
     lineHeight: tokens.lineHeightBase200,
     color: tokens.colorNeutralForeground3,
   },
-  cell: { padding: '1px 2px', verticalAlign: 'top' },
+  cell: { padding: '1px 2px', width: '116px', verticalAlign: 'top' },
+  look: { textAlign: 'left', paddingLeft: tokens.spacingHorizontalM },
   blank: { padding: 0 },
   historyColumn: { width: '36px', padding: 0, textAlign: 'right', borderBottom: 'none' },
   hidden: {

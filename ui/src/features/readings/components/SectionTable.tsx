@@ -51,7 +51,11 @@ export function SectionTable(props: SectionTableProps) {
               Place
             </th>
             {section.columns.map((take) => (
-              <th key={take} scope="col" className={styles.head}>
+              <th
+                key={take}
+                scope="col"
+                className={mergeClasses(styles.head, take === 'sign' && styles.look)}
+              >
                 {TAKE_WORDS[take].title}
               </th>
             ))}

@@ -34,6 +34,7 @@ const useStyles = makeStyles({
   button: {
     width: '100%',
     minWidth: '104px',
+    minHeight: '34px',
     justifyContent: 'flex-start',
     fontWeight: tokens.fontWeightRegular,
     paddingLeft: tokens.spacingHorizontalS,

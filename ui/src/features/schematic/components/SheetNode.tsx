@@ -31,6 +31,7 @@ const useStyles = makeStyles({
   },
   dot: { fill: 'currentColor' },
   point: { fill: tokens.colorNeutralBackground1, stroke: 'currentColor' },
+  junction: { fillOpacity: 0 },
   outline: { fill: 'none', stroke: tokens.colorNeutralForeground3 },
   measuredSign: { fill: tokens.colorBrandForeground1 },
   computedSign: { fill: 'none', stroke: tokens.colorNeutralForeground2 },
@@ -91,7 +92,15 @@ export const SheetNode = memo(function SheetNode({ data }: NodeProps<SheetNodeDa
         <circle key={index} cx={spot.x} cy={spot.y} r={3.4} className={styles.dot} />
       ))}
       {drawing.nodes.map((node) => (
-        <NodeLabel key={node.node} node={node} netlist={netlist} values={values[node.node]} />
+        <NodeLabel
+          key={node.node}
+          node={node}
+          netlist={netlist}
+          values={values[node.node]}
+          isJunction={drawing.dots.some(
+            ({ spot }) => spot.x === node.spot.x && spot.y === node.spot.y,
+          )}
+        />
       ))}
     </svg>
   );
@@ -109,10 +118,12 @@ function NodeLabel({
   node,
   netlist,
   values,
+  isJunction,
 }: {
   node: DrawnNode;
   netlist: Netlist;
   values?: NodeValues;
+  isJunction: boolean;
 }) {
   const styles = useStyles();
   const label = labelForNode(netlist, node.node);
@@ -125,9 +136,9 @@ function NodeLabel({
         <circle
           cx={node.spot.x}
           cy={node.spot.y}
-          r={3.2}
-          strokeWidth={1.6}
-          className={styles.point}
+          r={isJunction ? 6 : 3.2}
+          strokeWidth={isJunction ? 1.2 : 1.6}
+          className={mergeClasses(styles.point, isJunction && styles.junction)}
         />
       )}
       {(isPoint || hasValues) && (

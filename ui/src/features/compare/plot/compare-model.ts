@@ -1,0 +1,78 @@
+import { type Take } from '@engine/netlist/types';
+import { deviationInWords } from '@/lib/bench/chance';
+import { takenInWords } from '@/lib/bench/quantities';
+import { type ComparePoint } from '../api/get-compare';
+
+/** How far a reading lies off, for its mark; never said by colour alone. */
+export type Verdict = 'inside' | 'edge' | 'outside';
+
+const ORDER: Take[] = ['ac-volts', 'dc-volts', 'ripple-volts', 'ohms', 'lifted-ohms', 'amps'];
+
+/**
+ * Lists the kinds of reading there is something to compare for.
+ *
+ * @returns in the order volts, ripple, ohms, amps.
+ */
+export function takesOf(points: readonly ComparePoint[]): Take[] {
+  return ORDER.filter((take) => points.some((point) => point.take === take));
+}
+
+/** Points of one kind of reading, down the string; parts after points. */
+export function pointsOf(points: readonly ComparePoint[], take: Take): ComparePoint[] {
+  return points
+    .filter((point) => point.take === take)
+    .sort((a, b) => Number(a.kind === 'part') - Number(b.kind === 'part') || a.order - b.order);
+}
+
+/**
+ * Judges one measured value.
+ *
+ * @returns null when nothing was measured; an over-range reading where a value was expected is outside,
+ *   and so is a value where over range was expected.
+ */
+export function verdictOf(point: ComparePoint): Verdict | null {
+  const { measured, value, deviations } = point;
+  if (measured === undefined || measured === null) return null;
+  if (measured === 'OL' || value === null)
+    return measured === 'OL' && value === null ? 'inside' : 'outside';
+  const size = Math.abs(deviations ?? 0);
+  return size < 2 ? 'inside' : size < 3 ? 'edge' : 'outside';
+}
+
+/**
+ * Says how a measured value compares, as a sentence.
+ *
+ * @returns "38.2 V measured, 41.0 V computed: 7 % low, inside what tolerances allow."
+ */
+export function comparisonInWords(point: ComparePoint): string {
+  const { measured, value, take } = point;
+  const computed = value === null ? 'OL' : takenInWords(value, take);
+  if (measured === undefined || measured === null) return `Not measured yet, ${computed} computed.`;
+  const said = `${takenInWords(measured, take)} measured, ${computed} computed`;
+  return `${said}: ${deviationPhrase(point)}.`;
+}
+
+/** The part of the sentence after the values. */
+export function deviationPhrase(point: ComparePoint): string {
+  const { measured, value, deviations } = point;
+  if (measured === undefined || measured === null) return 'not measured yet';
+  if (measured === 'OL' || value === null) {
+    if (measured === 'OL' && value === null) return 'as it should be';
+    return measured === 'OL'
+      ? 'open where a value is expected'
+      : 'a value where the meter should be over range';
+  }
+  const percent = percentOff(measured, value);
+  const words = deviations === undefined || deviations === null ? '' : deviationInWords(deviations);
+  return [percent, words].filter(Boolean).join(', ');
+}
+
+/** "7 % low", "exact" below half a per cent, empty when the computed value is next to nothing. */
+export function percentOff(measured: number, value: number): string {
+  if (Math.abs(value) < 1e-6) return '';
+  const percent = ((measured - value) / Math.abs(value)) * 100;
+  if (Math.abs(percent) < 0.5) return 'no difference';
+  const size = Math.abs(percent) < 10 ? Math.abs(percent).toFixed(1) : Math.abs(percent).toFixed(0);
+  if (Number(size) > 999) return 'more than ten times as much';
+  return `${size.replace(/\.0$/, '')} % ${percent < 0 ? 'low' : 'high'}`;
+}

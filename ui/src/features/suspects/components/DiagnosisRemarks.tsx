@@ -1,0 +1,94 @@
+import { type DiagnosisResult } from '@engine/diagnosis-types';
+import { type Netlist } from '@engine/netlist/types';
+import {
+  Button,
+  makeStyles,
+  MessageBar,
+  MessageBarActions,
+  MessageBarBody,
+  MessageBarTitle,
+  tokens,
+} from '@fluentui/react-components';
+import { type CaseReading } from '@/lib/bench/case-reading';
+import { labelForReading, type Place } from '@/lib/bench/places';
+import { readingInWords } from '@/lib/bench/quantities';
+
+interface DiagnosisRemarksProps {
+  result: DiagnosisResult;
+  readings: readonly (CaseReading | undefined)[];
+  netlist: Netlist;
+  onEnterReading?: (place: Place) => void;
+}
+
+const useStyles = makeStyles({
+  root: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalS },
+  button: { '@media (pointer: coarse)': { minHeight: '44px' } },
+});
+
+/** What is to be said about the whole: cautions, none of these, readings to take again, remarks, advice. */
+export function DiagnosisRemarks(props: DiagnosisRemarksProps) {
+  const { result, readings, netlist, onEnterReading } = props;
+  const styles = useStyles();
+  const again = result.retake.flatMap((index) => readings[index] ?? []);
+  const cautions = result.advice.filter(({ effect }) => effect === 'caution');
+  const advice = result.advice.filter(({ effect }) => effect === 'advice');
+  const bars = [
+    ...cautions.map(({ rule, text, because }) => (
+      <MessageBar key={rule} intent="warning" layout="multiline">
+        <MessageBarBody>
+          <MessageBarTitle>Caution</MessageBarTitle>
+          {text} {because}
+        </MessageBarBody>
+      </MessageBar>
+    )),
+    result.noneOfThese && (
+      <MessageBar key="none" intent="warning" layout="multiline">
+        <MessageBarBody>
+          <MessageBarTitle>Perhaps none of these</MessageBarTitle>
+          Even the best suspect explains the readings badly. Check the readings marked below, and
+          whether the set differs from its drawing.
+        </MessageBarBody>
+      </MessageBar>
+    ),
+    ...again.map((reading) => (
+      <MessageBar key={reading.id} intent="info" layout="multiline">
+        <MessageBarBody>
+          <MessageBarTitle>Take this one again</MessageBarTitle>
+          {capital(labelForReading(netlist, reading))} gave {readingInWords(reading)}, which fits
+          none of the good suspects.
+        </MessageBarBody>
+        {onEnterReading && (
+          <MessageBarActions>
+            <Button
+              size="small"
+              className={styles.button}
+              onClick={() =>
+                onEnterReading({ take: reading.take, at: reading.at, part: reading.part })
+              }
+            >
+              Enter it again
+            </Button>
+          </MessageBarActions>
+        )}
+      </MessageBar>
+    )),
+    ...result.remarks.map((remark) => (
+      <MessageBar key={remark} intent="info" layout="multiline">
+        <MessageBarBody>{remark}</MessageBarBody>
+      </MessageBar>
+    )),
+    ...advice.map(({ rule, text, because }) => (
+      <MessageBar key={rule} intent="success" layout="multiline">
+        <MessageBarBody>
+          <MessageBarTitle>Advice</MessageBarTitle>
+          {text} {because}
+        </MessageBarBody>
+      </MessageBar>
+    )),
+  ].filter(Boolean);
+  return bars.length > 0 ? <div className={styles.root}>{bars}</div> : null;
+}
+
+function capital(text: string): string {
+  return text[0].toUpperCase() + text.slice(1);
+}
