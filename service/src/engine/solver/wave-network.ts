@@ -62,9 +62,14 @@ export class WaveNetwork {
    * Settles the block under the given values.
    *
    * @param line factor on the line voltage.
+   * @param meter a meter's resistance between two nodes, as part of the circuit.
    * @returns null when it does not settle.
    */
-  solve(values: BranchValues, line = 1): WaveSolution | null {
+  solve(
+    values: BranchValues,
+    line = 1,
+    meter?: { a: number; b: number; ohms: number },
+  ): WaveSolution | null {
     const { circuit } = this;
     const elements: BranchElement[] = [];
     const element = new Int32Array(circuit.branches.length).fill(-1);
@@ -84,6 +89,10 @@ export class WaveNetwork {
       });
     }
     elements.push(...leaks);
+    if (meter) {
+      const { a, b, ohms } = meter;
+      elements.push({ kind: 'resistance', a: this.row[a], b: this.row[b], ohms });
+    }
     const state = solveSteadyState(elements, this.count, circuit.hertz, { start: this.warm });
     if (!state.converged) return null;
     this.warm ??= state.warmStart;

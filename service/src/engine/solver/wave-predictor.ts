@@ -14,6 +14,8 @@ import { perturb } from './wave-perturb';
 const MOST_KEPT = 20000;
 /** Finite-difference step, in standard deviations of the parameter. */
 const STEP = 0.5;
+/** A meter that pulls its node down by more than this factor is solved as part of the circuit. */
+const MUCH_LOADED = 1.3;
 /** A rail that fell below this share of its healthy value shows only millivolts of no meaning. */
 const COLLAPSED = 0.01;
 
@@ -203,27 +205,44 @@ export class WavePredictor {
     this.solved += 1;
     if (!solution) return null;
     const out = new Float64Array(this.list.rows.length);
-    let isLoaded = false;
+    const { circuit, network, loading, adjoint } = this;
+    let behindIs: 'direct' | 'alternating' | null = null;
     this.list.rows.forEach((r, i) => {
       const spec = this.list.specs[r];
-      const open = readMeter(this.network, solution, spec, this.circuit);
-      if (spec.take !== 'dc-volts') {
-        out[i] = open;
+      out[i] = readMeter(network, solution, spec, circuit);
+      if (spec.take === 'amps') return;
+      const kind = spec.take === 'dc-volts' ? 'direct' : 'alternating';
+      if (behindIs !== kind) {
+        if (!loading.solve(this.smallSignal(values, solution, kind === 'direct'))) return;
+        behindIs = kind;
+      }
+      loading.response(spec.a, spec.b, adjoint);
+      const factor = 1 + spec.meter.siemens * (adjoint[spec.a] - adjoint[spec.b]);
+      const isInside = network.rowOf(spec.a) >= 0 && network.rowOf(spec.b) >= 0;
+      if (factor < MUCH_LOADED || !isInside) {
+        out[i] /= factor;
         return;
       }
-      if (!isLoaded) {
-        if (!this.loading.solve(this.directConductances(values, solution))) return;
-        isLoaded = true;
-      }
-      this.loading.response(spec.a, spec.b, this.adjoint);
-      const behind = this.adjoint[spec.a] - this.adjoint[spec.b];
-      out[i] = open / (1 + spec.meter.siemens * behind);
+      // A cut-off node is what the meter makes of it: solve with the meter in place.
+      const { a, b, meter } = spec;
+      const loaded = network.solve(values, line, { a, b, ohms: 1 / meter.siemens });
+      this.solved += 1;
+      if (loaded) out[i] = readMeter(network, loaded, spec, circuit);
+      else out[i] /= factor;
     });
     return out;
   }
 
-  /** What a small direct current meets in every branch: decides how far a meter pulls a node down. */
-  private directConductances(values: BranchValues, { state, element }: WaveSolution): Float64Array {
+  /**
+   * What a small current meets in every branch, direct or of line frequency: decides how far a
+   * meter pulls a node down.
+   */
+  private smallSignal(
+    values: BranchValues,
+    { state, element }: WaveSolution,
+    isDirect: boolean,
+  ): Float64Array {
+    const omega = 2 * Math.PI * this.circuit.hertz;
     return Float64Array.from(this.circuit.branches, (_, k) => {
       const [p0, p1, p2] = [values.p0[k], values.p1[k], values.p2[k]];
       switch (values.law[k]) {
@@ -234,10 +253,12 @@ export class WavePredictor {
         case Law.Ntc:
           return 1 / p0;
         case Law.Capacitor:
-          return 1 / p2;
+          return 1 / p2 + (isDirect ? 0 : 1 / Math.hypot(p1, 1 / (omega * p0)));
         case Law.Rectifier:
-          // Averaged over a cycle, a conducting rectifier lets a direct current through for a tenth of it.
+          // Averaged over a cycle, a conducting rectifier lets current through for a tenth of it.
           return (state.current(element[k]).mean > 1e-6 ? 0.1 / p1 : 0) + 1 / p2;
+        case Law.Choke:
+          return 1 / (isDirect ? p1 : Math.hypot(p1, omega * p0));
         case Law.Load:
           return (p2 * p0) / p1;
         default:

@@ -9,8 +9,8 @@ const AT_SWITCH = 1e-10;
 const BACKWARDS = 1e-13;
 /** Pulses a cubic says are this close to reaching conduction are looked at exactly. */
 const NEAR_SWITCH = 1e-6;
-/** The first step after a switching is this many times shorter. */
-const FINEST = 32;
+/** After a switching the first step is 2^k times shorter, k between these; more in a stiff pattern. */
+const FINER = { least: 5, most: 11 };
 const MOST_LOCATIONS = 12;
 
 /** One cycle as it was run: samples of ξ and the pattern that held between them. */
@@ -86,13 +86,14 @@ export class CycleRunner {
     this.clock(start, 0);
     trace.count = 0;
     let time = 0;
-    let finer = 0;
+    let finer = 1;
+    let isFirst = false;
     let at = this.settle(start);
     this.look(network.met[at], start, this.gaps, this.rates);
     this.record(time, start);
     while (time < period) {
       const conduction = network.met[at];
-      let length = Math.min(finer > 1 ? step / finer : step, period - time);
+      let length = Math.min(step / finer, period - time);
       this.move(conduction, start, length, time, trial);
       this.look(conduction, trial, this.nextGaps, this.nextRates);
       let flips = -1;
@@ -118,12 +119,16 @@ export class CycleRunner {
         if (flips >= 0) this.pattern = conduction.pattern ^ (1 << flips);
         at = this.settle(start);
         this.look(network.met[at], start, this.gaps, this.rates);
-        // What is faster than a step shows right after a switching: begin finely, h/64, h/32, h/16 …
-        finer = 2 * FINEST;
+        // What is faster than a step shows right after a switching: begin finely and double.
+        const { halvings } = network.met[at].propagator;
+        finer = 2 ** Math.max(FINER.least, Math.min(halvings, FINER.most));
+        isFirst = true;
       } else {
         this.gaps.set(this.nextGaps);
         this.rates.set(this.nextRates);
-        if (finer > 1) finer = finer > FINEST ? FINEST : finer / 2;
+        // Two steps of the shortest length, then doubling: together one whole step.
+        if (finer > 1 && !isFirst) finer /= 2;
+        isFirst = false;
       }
     }
     trace.which[trace.count - 1] = at;

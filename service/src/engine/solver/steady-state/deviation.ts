@@ -2,7 +2,7 @@ import type { Conduction } from './conduction';
 import { dot, solveDense } from './dense';
 import { type Disturbance, disturbanceOf, type Field } from './disturbance';
 import { ForcedSteps } from './forced-steps';
-import type { Outputs } from './outputs';
+import type { GapAnswer, Outputs } from './outputs';
 import type { SteadyState } from './steady-state';
 
 /** How the states and ψ deviate through one cycle. */
@@ -20,7 +20,7 @@ export interface Deviation {
 /** Runs deviations through a solved cycle and reads the outputs off them. */
 export class DeviationField {
   private readonly impedances: Float64Array[];
-  /** Inverse of 1 − monodromy. */
+  /** Inverse of 1 − derivative of the end states by the start states. */
   private readonly closing: Float64Array;
   private readonly deviation: Deviation;
 
@@ -28,16 +28,9 @@ export class DeviationField {
     private readonly state: SteadyState,
     private readonly outputs: Outputs,
   ) {
-    const { network, monodromy, trace } = state;
+    const { network, trace } = state;
     const n = network.block.states;
     this.impedances = network.met.map(({ pattern }) => network.impedances(pattern));
-    const matrix = new Float64Array(n * n);
-    this.closing = new Float64Array(n * n);
-    for (let i = 0; i < n; i += 1) {
-      this.closing[i * n + i] = 1;
-      for (let j = 0; j < n; j += 1) matrix[i * n + j] = (i === j ? 1 : 0) - monodromy[j * n + i];
-    }
-    solveDense(matrix, this.closing, n, n);
     this.deviation = {
       d: new Float64Array(trace.count * n),
       from: new Float64Array(trace.count),
@@ -46,14 +39,22 @@ export class DeviationField {
       psiRates: new Float64Array(2 * outputs.runs.length),
     };
     const nothing = network.met.map(() => undefined);
+    // Newton's monodromy is a little rough beside fast modes; a nearly unloaded supply needs better.
+    const matrix = new Float64Array(n * n);
+    this.closing = new Float64Array(n * n);
     for (let s = 0; s < n; s += 1) {
       this.deviation.d.fill(0, 0, n);
       this.deviation.d[s] = 1;
       this.run(nothing);
+      this.closing[s * n + s] = 1;
+      for (let i = 0; i < n; i += 1) {
+        matrix[i * n + s] = (i === s ? 1 : 0) - this.deviation.d[(trace.count - 1) * n + i];
+      }
       outputs.read(this.deviation, nothing).forEach((value, o) => {
         outputs.outputs[o].ofStart[s] = value;
       });
     }
+    solveDense(matrix, this.closing, n, n);
   }
 
   /** Change of every output per relative change of one figure, the cycle staying periodic. */
@@ -64,13 +65,23 @@ export class DeviationField {
     const disturbances = network.met.map((conduction, m) =>
       disturbanceOf(network, conduction, this.impedances[m], k, name),
     );
-    const direct = disturbances.map((disturbance, m) => disturbance && outputs.direct(disturbance, m));
+    const direct = disturbances.map(
+      (disturbance, m) => disturbance && outputs.direct(disturbance, m),
+    );
     deviation.d.fill(0, 0, n);
     this.run(disturbances);
     const start = new Float64Array(n);
-    for (let i = 0; i < n; i += 1) start[i] = dot(closing, i * n, deviation.d, (trace.count - 1) * n, n);
+    for (let i = 0; i < n; i += 1)
+      start[i] = dot(closing, i * n, deviation.d, (trace.count - 1) * n, n);
+    const gapAnswer: GapAnswer = (rectifier, m, psi) => {
+      const element = network.block.elements[network.block.rectifiers[rectifier]];
+      const nodes = disturbances[m]?.nodes;
+      const moved = nodes ? psi * (nodes[element.a] - nodes[element.b]) : 0;
+      const isDrop = name === 'dropVolts' && network.block.rectifiers[rectifier] === k;
+      return isDrop && element.kind === 'rectifier' ? moved - element.dropVolts : moved;
+    };
     return outputs
-      .read(deviation, direct)
+      .read(deviation, direct, gapAnswer)
       .map((value, o) => value + dot(outputs.outputs[o].ofStart, 0, start, 0, n));
   }
 
@@ -97,12 +108,9 @@ export class DeviationField {
           const rate = rows[run.which]!;
           from[k] = dot(disturbance.psi, 0, trace.xi, k * width, width);
           to[k] = dot(disturbance.psi, 0, trace.xi, (k + 1) * width, width);
-          // A straight line with the area of the cubic through both ends and slopes.
-          const lift =
-            (run.length / 12) *
-            (dot(rate, 0, trace.xi, k * width, width) -
-              dot(rate, 0, trace.xi, (k + 1) * width, width));
-          steps.advance(now, run.length, from[k] + lift, to[k] + lift);
+          const fromSlope = dot(rate, 0, trace.xi, k * width, width);
+          const toSlope = dot(rate, 0, trace.xi, (k + 1) * width, width);
+          steps.advance(now, run.length, from[k], fromSlope, to[k], toSlope);
         } else {
           from[k] = 0;
           to[k] = 0;

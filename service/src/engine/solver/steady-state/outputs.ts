@@ -9,6 +9,18 @@ export type Request =
   | { what: 'mean' | 'rms' | 'acRms' | 'peakToPeak'; a: number; b: number }
   | { what: 'mean' | 'rms'; element: number };
 
+/** A place within a step that has a weight. */
+interface Instant {
+  step: number;
+  part: number;
+  weight: number;
+  /**
+   * Set when a rectifier switches just there: a peak in a corner of the waveform moves along with
+   * the switching, by `slope` per unit of time; `rate` is that of the rectifier's own voltage.
+   */
+  corner?: { rectifier: number; slope: number; rate: number };
+}
+
 /**
  * One reading as a weighted sum of a waveform's values and end slopes. Averages of every waveform
  * share their weights and have none of their own.
@@ -18,7 +30,7 @@ interface Output {
   /** Rows over ξ per pattern. */
   rows: Float64Array;
   /** Instants that count, for peaks. */
-  instants: { step: number; part: number; weight: number }[];
+  instants: Instant[];
   /** Weight of each sample of each run, run after run; empty but for RMS values. */
   values: Float64Array;
   /** Weight of the slope at either end of each run. */
@@ -26,6 +38,9 @@ interface Output {
   /** Change of the reading per deviation of each start state. */
   ofStart: Float64Array;
 }
+
+/** What ψ itself, of the given value, does to the voltage beyond a rectifier's drop under pattern m. */
+export type GapAnswer = (rectifier: number, m: number, psi: number) => number;
 
 /** Readings prepared for many deviations of one cycle. */
 export class Outputs {
@@ -53,8 +68,16 @@ export class Outputs {
     );
   }
 
-  /** Change of every output by one deviation, the start states' share left out. */
-  read(deviation: Deviation, direct: readonly (Float64Array | undefined)[]): Float64Array {
+  /**
+   * Change of every output by one deviation, the start states' share left out.
+   *
+   * @param direct effect of ψ itself on every output, per pattern.
+   */
+  read(
+    deviation: Deviation,
+    direct: readonly (Float64Array | undefined)[],
+    gapAnswer: GapAnswer = () => 0,
+  ): Float64Array {
     const { width, states: n } = this.state.network.block;
     const averages = this.averages(deviation);
     return Float64Array.from(this.outputs, (output, o) => {
@@ -67,11 +90,19 @@ export class Outputs {
         });
         return sum;
       }
-      for (const { step, part, weight } of output.instants) {
+      for (const { step, part, weight, corner } of output.instants) {
         const m = this.state.trace.which[step];
         const answer = direct[m]?.[o] ?? 0;
+        if (corner) {
+          const { gap } = this.state.network.met[m];
+          const moved =
+            dot(gap, corner.rectifier * width, deviation.d, (step + 1) * n, n) +
+            gapAnswer(corner.rectifier, m, deviation.to[step]);
+          sum -= (weight * corner.slope * moved) / corner.rate;
+        }
         const from = dot(rows, m * width, deviation.d, step * n, n) + answer * deviation.from[step];
-        const to = dot(rows, m * width, deviation.d, (step + 1) * n, n) + answer * deviation.to[step];
+        const to =
+          dot(rows, m * width, deviation.d, (step + 1) * n, n) + answer * deviation.to[step];
         sum += weight * ((1 - part) * from + part * to);
       }
       if (output.values.length === 0) return sum;
@@ -131,12 +162,29 @@ export class Outputs {
     };
     if (request.what === 'peakToPeak') {
       const { highAt, lowAt } = state.extremes(request.a, request.b);
-      output.instants.push({ step: highAt.sample, part: highAt.part, weight: 1 });
-      output.instants.push({ step: lowAt.sample, part: lowAt.part, weight: -1 });
+      output.instants.push(this.instant(output, highAt, 1), this.instant(output, lowAt, -1));
     } else if (request.what !== 'mean') {
       this.weigh(output);
     }
     return output;
+  }
+
+  private instant(output: Output, at: { sample: number; part: number }, weight: number): Instant {
+    const { trace, network } = this.state;
+    const { width, rectifiers } = network.block;
+    // The end of one step rather than the start of the next: the pattern before a switching.
+    const isStart = at.part === 0 && at.sample > 0;
+    const step = isStart ? at.sample - 1 : at.sample;
+    const part = isStart ? 1 : at.part;
+    const m = trace.which[step];
+    const change = network.met[m].pattern ^ network.met[trace.which[step + 1] ?? m].pattern;
+    if (part < 1 || change === 0 || step + 2 >= trace.count) return { step, part, weight };
+    const rectifier = rectifiers.findIndex((_, bit) => (change & (1 << bit)) !== 0);
+    const end = (step + 1) * width;
+    const row = output.rows.subarray(m * width, (m + 1) * width);
+    const slope = dot(network.met[m].rateRow(row), 0, trace.xi, end, width);
+    const rate = dot(network.met[m].gapRate, rectifier * width, trace.xi, end, width);
+    return { step, part, weight, corner: rate === 0 ? undefined : { rectifier, slope, rate } };
   }
 
   /** Weights of an RMS value: the waveform itself over its RMS value, by the rule `gatherGram` uses. */
@@ -145,7 +193,8 @@ export class Outputs {
     const { trace, network } = state;
     const { width, period } = network.block;
     const { request, rows } = output;
-    const moments = 'a' in request ? state.pair(request.a, request.b) : state.current(request.element);
+    const moments =
+      'a' in request ? state.pair(request.a, request.b) : state.current(request.element);
     const base = request.what === 'acRms' ? moments.mean : 0;
     const size = request.what === 'acRms' ? moments.acRms : moments.rms;
     const scale = size > 0 ? 1 / size : 0;

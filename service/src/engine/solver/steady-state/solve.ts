@@ -13,14 +13,15 @@ export interface SolveOptions {
   steps?: number;
   /** A solved neighbour: the same nodes, elements mostly at the same places in the list. */
   start?: SteadyState | WarmStart;
-  /** Size of the last Newton step, as a fraction of the largest source voltage. Default 1e-6. */
+  /**
+   * Size of the last Newton step, as a fraction of the largest source voltage; conductances of slow
+   * parts settle to a tenth of it. Default 1e-6.
+   */
   tolerance?: number;
   /** Cycles before giving up. Default 100. */
   mostCycles?: number;
 }
 
-/** Relative change of a slow part's conductance that counts as settled. */
-const SLOW_TOLERANCE = 1e-7;
 const STEPS = 64;
 const MOST_STEPS = 512;
 /** Newton steps above this fraction of scale say little about averages yet. */
@@ -57,6 +58,7 @@ export function solveSteadyState(
   const network = new Network(block, block.period / (options.steps ?? stepsFor(block)));
   const runner = new CycleRunner(network);
   const tolerance = (options.tolerance ?? 1e-6) * block.scale;
+  const slowTolerance = (options.tolerance ?? 1e-6) / 10;
   const mostCycles = options.mostCycles ?? 100;
   const start = options.start instanceof SteadyState ? options.start.warmStart : options.start;
   const x0 = firstStates(block, start);
@@ -80,7 +82,7 @@ export function solveSteadyState(
       runner.correct(search.step);
       gram = gatherGram(network, runner.trace);
       const miss = slowMiss(network, gram, z);
-      isSettled = miss.every((value) => Math.abs(value) <= SLOW_TOLERANCE);
+      isSettled = miss.every((value) => Math.abs(value) <= slowTolerance);
       if (!isSettled && !isLast) {
         z = cycle > PATIENCE ? z.map((value, i) => value + 0.5 * miss[i]) : slow.next(z, miss);
       }
@@ -89,7 +91,7 @@ export function solveSteadyState(
     }
     if ((isClose && isSettled) || isLast) {
       gram ??= gatherGram(network, runner.trace);
-      return new SteadyState(network, runner.trace, isClose && isSettled, cycle, gram, monodromy);
+      return new SteadyState(network, runner.trace, isClose && isSettled, cycle, gram);
     }
     search.next(x0, runner.end);
   }

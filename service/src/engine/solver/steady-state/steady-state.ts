@@ -46,8 +46,6 @@ export class SteadyState {
     /** Cycles that were run. */
     readonly cycles: number,
     private readonly gram: Gram,
-    /** Derivative of the states at the end of the cycle by those at its start, column after column. */
-    readonly monodromy: Float64Array,
   ) {}
 
   /** Average volts of every node. */
