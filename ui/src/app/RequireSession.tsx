@@ -1,0 +1,16 @@
+import { Navigate, Outlet, useLocation } from 'react-router-dom';
+import { FailedState } from '@/components/FailedState';
+import { LoadingState } from '@/components/LoadingState';
+import { useSession } from '@/lib/session';
+import { paths } from './paths';
+
+/** Lets only people who are signed in past; everybody else signs in first and comes back. */
+export function RequireSession() {
+  const session = useSession();
+  const { pathname, search } = useLocation();
+  if (session.isPending) return <LoadingState label="Opening your bench" />;
+  if (session.isError)
+    return <FailedState error={session.error} onRetry={() => void session.refetch()} />;
+  if (!session.data) return <Navigate to={paths.signIn(pathname + search)} replace />;
+  return <Outlet />;
+}

@@ -1,0 +1,125 @@
+import { type FaultMode, type AsFound, type Netlist } from '@engine/netlist/types';
+
+/** What a person may do in the shop, from least to most. */
+export const ROLES = ['trainee', 'technician', 'senior', 'owner'] as const;
+export type Role = (typeof ROLES)[number];
+
+/** What the service would let this person do; the screens hide the rest. */
+export type Abilities = Record<string, boolean>;
+
+export interface Person {
+  id: string;
+  name: string;
+  email: string;
+  role: Role;
+  isBlocked?: boolean;
+  /** Invited and not yet accepted. */
+  isInvited?: boolean;
+  abilities?: Abilities;
+}
+
+export interface SignedIn {
+  accessToken: string;
+  /** Seconds until the access token runs out. */
+  expiresIn: number;
+  person: Person;
+}
+
+export interface PersonRef {
+  id: string;
+  name: string;
+}
+
+export const CASE_STATES = ['open', 'waiting', 'closed'] as const;
+export type CaseState = string;
+
+export interface CaseSummary {
+  id: string;
+  number: number | string;
+  set: string;
+  complaint: string;
+  state: CaseState;
+  openedAt: string;
+  openedBy?: PersonRef | null;
+  assignedTo?: PersonRef | null;
+  familyId?: string | null;
+  familyName?: string | null;
+}
+
+export interface ConfirmedFault {
+  part: string;
+  mode: FaultMode;
+}
+
+export type Outcome = 'repaired' | 'no-fault' | 'not-repaired';
+
+export interface Case extends CaseSummary {
+  earlierWork?: string | null;
+  familyVersion?: number | null;
+  netlist: Netlist;
+  asFound: AsFound[];
+  lineVolts?: number | null;
+  cautionAcknowledged: unknown;
+  confirmedFaults: ConfirmedFault[];
+  closedAt?: string | null;
+  outcome?: Outcome | null;
+  closingNote?: string | null;
+  version: number;
+  abilities: Abilities;
+}
+
+export interface FamilySummary {
+  id: string;
+  name: string;
+  kind: string;
+  tags?: string[];
+  version?: number;
+  solvedCases?: number;
+}
+
+export interface Family extends FamilySummary {
+  description?: string | null;
+  version: number;
+  netlist: Netlist;
+  versions: { version: number; by?: PersonRef | string | null; at: string; note?: string | null }[];
+  solved?: {
+    cases: number;
+    faults: { part: string; mode: FaultMode; count?: number; cases?: number }[];
+  };
+  abilities: Abilities;
+}
+
+export interface RuleSummary {
+  id: string;
+  pack: string;
+  name: string;
+  sentence: string;
+  effect: string;
+  because: string;
+  source?: string | null;
+  version: number;
+  state: string;
+  isRefused?: boolean;
+}
+
+export interface RuleList {
+  rules: RuleSummary[];
+  refused: { file: string; reason: string }[];
+}
+
+export interface PartFact {
+  id?: string;
+  type: string;
+  source: string;
+  status: string;
+  volts?: number;
+  amps?: number;
+  warmUp?: string | number | null;
+  note?: string | null;
+  [fact: string]: unknown;
+}
+
+export interface Page<Item> {
+  total: number;
+  items: Item[];
+}

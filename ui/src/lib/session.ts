@@ -1,0 +1,46 @@
+import { queryOptions, useQuery, useQueryClient } from '@tanstack/react-query';
+import { keepAccessToken } from './access-token';
+import { apiClient, refreshSession } from './api-client';
+import { type Person, type SignedIn } from './api-model';
+import { hasStatus } from './api-problem';
+
+/** Query options of the person who is signed in; null when nobody is. */
+export function sessionQuery() {
+  return queryOptions({
+    queryKey: ['session'],
+    queryFn: async (): Promise<Person | null> => {
+      try {
+        return (await refreshSession()).person;
+      } catch (error) {
+        if (hasStatus(error, 401) || hasStatus(error, 403)) return null;
+        throw error;
+      }
+    },
+    staleTime: Infinity,
+    gcTime: Infinity,
+    retry: 1,
+  });
+}
+
+/** The person who is signed in. */
+export function useSession() {
+  return useQuery(sessionQuery());
+}
+
+/** What to do once the service has let somebody in, and how to leave again. */
+export function useSessionActions() {
+  const client = useQueryClient();
+  const enter = (signedIn: SignedIn) => {
+    client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'session' });
+    keepAccessToken(signedIn.accessToken);
+    client.setQueryData(sessionQuery().queryKey, signedIn.person);
+  };
+  const leave = async () => {
+    // Signing out must also work while the service is away: the token is forgotten either way.
+    await apiClient.post('/auth/sign-out').catch(() => undefined);
+    keepAccessToken(null);
+    client.setQueryData(sessionQuery().queryKey, null);
+    client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'session' });
+  };
+  return { enter, leave };
+}

@@ -1,0 +1,25 @@
+import { render } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { createMemoryRouter, RouterProvider } from 'react-router-dom';
+import { AppProviders } from '@/app/AppProviders';
+import { makeQueryClient } from '@/app/query-client';
+import { routes } from '@/app/router';
+import { keepAccessToken } from '@/lib/access-token';
+
+/**
+ * Renders the whole product at an address, with the service played by `fakeService`.
+ *
+ * @param path address to open.
+ * @returns the testing library's result, a user to act with and the router.
+ */
+export function renderApp(path = '/') {
+  keepAccessToken(null);
+  const router = createMemoryRouter(routes, { initialEntries: [path] });
+  const user = userEvent.setup();
+  const view = render(
+    <AppProviders queryClient={makeQueryClient(0)}>
+      <RouterProvider router={router} />
+    </AppProviders>,
+  );
+  return { ...view, user, router };
+}

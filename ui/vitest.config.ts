@@ -1,0 +1,18 @@
+import react from '@vitejs/plugin-react';
+import { configDefaults, defineConfig } from 'vitest/config';
+import { alias } from './vite.config';
+
+// Vitest reads its settings from a default export only.
+// eslint-disable-next-line no-restricted-syntax
+export default defineConfig({
+  plugins: [react()],
+  resolve: { alias },
+  test: {
+    environment: 'jsdom',
+    setupFiles: ['./src/testing/setup.ts'],
+    exclude: [...configDefaults.exclude, 'e2e/**'],
+    css: false,
+    testTimeout: 20_000,
+    restoreMocks: true,
+  },
+});
