@@ -9,8 +9,10 @@ const AT_SWITCH = 1e-10;
 const BACKWARDS = 1e-13;
 /** Pulses a cubic says are this close to reaching conduction are looked at exactly. */
 const NEAR_SWITCH = 1e-6;
-/** After a switching the first step is 2^k times shorter, k between these; more in a stiff pattern. */
-const FINER = { least: 5, most: 11 };
+/** After a switching into a stiff pattern the first step is up to 2^k times shorter. */
+const FINEST = 11;
+/** Steps a stretch under one pattern has at least. */
+const SHORT_RUN = 4;
 const MOST_LOCATIONS = 12;
 
 /** One cycle as it was run: samples of ξ and the pattern that held between them. */
@@ -87,7 +89,8 @@ export class CycleRunner {
     trace.count = 0;
     let time = 0;
     let finer = 1;
-    let isFirst = false;
+    let since = 0;
+    let isShort = false;
     let at = this.settle(start);
     this.look(network.met[at], start, this.gaps, this.rates);
     this.record(time, start);
@@ -99,6 +102,12 @@ export class CycleRunner {
       let flips = -1;
       if (switchings < mostSwitchings) {
         const event = this.firstSwitching(conduction, start, length, time);
+        if (event && !isShort && since < SHORT_RUN && event.length > 1e-6 * step) {
+          // A pulse shorter than a few steps: sample it finely, or averages miss its shape.
+          finer = (SHORT_RUN + 0.5) * (step / event.length);
+          isShort = true;
+          continue;
+        }
         if (event) {
           flips = event.rectifier;
           length = event.length;
@@ -121,14 +130,15 @@ export class CycleRunner {
         this.look(network.met[at], start, this.gaps, this.rates);
         // What is faster than a step shows right after a switching: begin finely and double.
         const { halvings } = network.met[at].propagator;
-        finer = 2 ** Math.max(FINER.least, Math.min(halvings, FINER.most));
-        isFirst = true;
+        finer = 2 ** Math.min(halvings, FINEST);
+        since = 0;
+        isShort = false;
       } else {
         this.gaps.set(this.nextGaps);
         this.rates.set(this.nextRates);
         // Two steps of the shortest length, then doubling: together one whole step.
-        if (finer > 1 && !isFirst) finer /= 2;
-        isFirst = false;
+        if (finer > 1 && !isShort && since > 0) finer = Math.max(1, finer / 2);
+        since += 1;
       }
     }
     trace.which[trace.count - 1] = at;

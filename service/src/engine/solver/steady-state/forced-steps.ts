@@ -16,6 +16,8 @@ export class ForcedSteps {
   /** Level after level: the answers to the four powers over that level's length. */
   private readonly answers: Float64Array;
   private readonly c = new Float64Array(POWERS);
+  private readonly term: Float64Array;
+  private readonly next: Float64Array;
 
   /** @param rates effect of J on the rate of each state. */
   constructor(
@@ -24,6 +26,8 @@ export class ForcedSteps {
   ) {
     const { n, halvings } = propagator;
     this.answers = new Float64Array((halvings + 1) * POWERS * n);
+    this.term = new Float64Array(n);
+    this.next = new Float64Array(n);
     this.shortest();
     for (let level = halvings; level > 0; level -= 1) this.double(level);
   }
@@ -82,18 +86,23 @@ export class ForcedSteps {
     if (length <= 0) return;
     const { n, a } = this.propagator;
     const { c } = this;
-    let term = d.slice();
-    // Scaled derivatives of the drive: c[k]·k!/k! · length^k.
+    let term = this.term;
+    let next = this.next;
+    term.set(d);
+    let power = 1;
     for (let k = 1; k <= SERIES; k += 1) {
-      const drive = k <= POWERS ? c[k - 1] * length ** (k - 1) : 0;
-      const next = new Float64Array(n);
-      for (let i = 0; i < n; i += 1) {
+      const drive = k <= POWERS ? c[k - 1] * power : 0;
+      power *= length;
+      let largest = 0;
+      for (let i = 0, p = 0; i < n; i += 1) {
         let sum = drive * this.rates[i];
-        for (let j = 0; j < n; j += 1) sum += a[i * n + j] * term[j];
+        for (let j = 0; j < n; j += 1, p += 1) sum += a[p] * term[j];
         next[i] = (sum * length) / k;
         d[i] += next[i];
+        largest = Math.max(largest, Math.abs(next[i]) - 1e-15 * Math.abs(d[i]));
       }
-      term = next;
+      if (largest <= 0 && k >= POWERS) return;
+      [term, next] = [next, term];
     }
   }
 
