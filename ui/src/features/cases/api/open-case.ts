@@ -1,0 +1,94 @@
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { type Netlist } from '@engine/netlist/types';
+import { z } from 'zod';
+import { apiClient } from '@/lib/api-client';
+import { type Case } from '@/lib/api-model';
+import { readQuantity } from '@/components/QuantityInput';
+
+/** Where the circuit of a new case comes from. */
+export const CIRCUIT_SOURCES = ['family', 'json', 'csv'] as const;
+
+/** What the form for a new case holds. */
+export const openCaseSchema = z
+  .object({
+    set: z.string().trim().min(1, 'Say which set is on the bench.').max(200),
+    complaint: z.string().trim().min(1, 'Say what is wrong with it, in a sentence.').max(2000),
+    source: z.enum(CIRCUIT_SOURCES),
+    familyId: z.string(),
+    netlistText: z.string(),
+    csv: z.string(),
+    reference: z.string(),
+    lineVolts: z.string(),
+  })
+  .superRefine((form, context) => {
+    const refuse = (path: keyof typeof form, message: string) =>
+      context.addIssue({ code: 'custom', path: [path], message });
+    if (form.source === 'family' && !form.familyId) refuse('familyId', 'Choose a family.');
+    if (form.source === 'json') {
+      const read = readDocument(form.netlistText);
+      if (!read.ok) refuse('netlistText', read.message);
+    }
+    if (form.source === 'csv') {
+      if (!form.csv.trim()) refuse('csv', 'Paste the table of parts, or choose a file.');
+      if (!form.reference.trim())
+        refuse('reference', 'Name the node that readings are taken against.');
+    }
+    const volts = readQuantity(form.lineVolts, 'V');
+    if (!volts.ok) refuse('lineVolts', volts.message);
+  });
+export type OpenCaseForm = z.infer<typeof openCaseSchema>;
+
+/**
+ * Reads a pasted netlist as far as its syntax goes; what it means is checked by the service.
+ *
+ * @param text what was pasted.
+ * @returns the document, or a sentence that says what is wrong.
+ */
+export function readDocument(
+  text: string,
+): { ok: true; netlist: Netlist } | { ok: false; message: string } {
+  if (!text.trim()) return { ok: false, message: 'Paste the netlist, or choose a file.' };
+  try {
+    const document: unknown = JSON.parse(text);
+    if (typeof document === 'object' && document !== null && !Array.isArray(document))
+      return { ok: true, netlist: document as Netlist };
+  } catch (error) {
+    return {
+      ok: false,
+      message: `This is not readable as JSON. ${(error as Error).message}.`.replace('..', '.'),
+    };
+  }
+  return { ok: false, message: 'A netlist is one JSON object, from { to }.' };
+}
+
+async function circuitOf(form: OpenCaseForm): Promise<{ familyId?: string; netlist?: Netlist }> {
+  if (form.source === 'family') return { familyId: form.familyId };
+  if (form.source === 'json') {
+    const read = readDocument(form.netlistText);
+    return read.ok ? { netlist: read.netlist } : {};
+  }
+  const { data } = await apiClient.post<{ netlist: Netlist }>('/circuits/import-csv', {
+    csv: form.csv,
+    title: form.set,
+    reference: form.reference.trim(),
+  });
+  return { netlist: data.netlist };
+}
+
+/** Opens a case; a pasted table of parts is turned into a circuit first. */
+export function useOpenCase() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: async (form: OpenCaseForm) => {
+      const volts = readQuantity(form.lineVolts, 'V');
+      const { data } = await apiClient.post<Case>('/cases', {
+        set: form.set,
+        complaint: form.complaint,
+        lineVolts: volts.ok ? volts.value : undefined,
+        ...(await circuitOf(form)),
+      });
+      return data;
+    },
+    onSuccess: () => client.invalidateQueries({ queryKey: ['cases', 'list'] }),
+  });
+}

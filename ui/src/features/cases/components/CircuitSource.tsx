@@ -1,0 +1,102 @@
+import { Field, makeStyles, Radio, RadioGroup, Select, tokens } from '@fluentui/react-components';
+import { type Control, useController, useWatch } from 'react-hook-form';
+import { FileButton } from '@/components/FileButton';
+import { TextField } from '@/components/TextField';
+import { type FamilySummary } from '@/lib/api-model';
+import { type OpenCaseForm } from '../api/open-case';
+
+const useStyles = makeStyles({
+  root: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalM },
+});
+
+interface CircuitSourceProps {
+  control: Control<OpenCaseForm>;
+  families: readonly FamilySummary[];
+  familiesMessage?: string;
+  /** A file was read into this field. */
+  onFile: (field: 'netlistText' | 'csv', text: string) => void;
+}
+
+/** Where the circuit of a new case comes from: a family, a netlist, or a table of parts. */
+export function CircuitSource({ control, families, familiesMessage, onFile }: CircuitSourceProps) {
+  const styles = useStyles();
+  const source = useController({ control, name: 'source' });
+  const family = useController({ control, name: 'familyId' });
+  const chosen = useWatch({ control, name: 'source' });
+  return (
+    <div className={styles.root}>
+      <Field label="Circuit">
+        <RadioGroup value={chosen} onChange={(_event, { value }) => source.field.onChange(value)}>
+          <Radio value="family" label="From a chassis family" />
+          <Radio value="json" label="From a netlist (JSON)" />
+          <Radio value="csv" label="From a table of parts (CSV)" />
+        </RadioGroup>
+      </Field>
+      {chosen === 'family' && (
+        <Field
+          label="Family"
+          required
+          hint={familiesMessage}
+          validationMessage={family.fieldState.error?.message}
+        >
+          <Select
+            ref={family.field.ref}
+            size="large"
+            value={family.field.value}
+            onBlur={family.field.onBlur}
+            onChange={(_event, { value }) => family.field.onChange(value)}
+          >
+            <option value="">Choose a family</option>
+            {families.map(({ id, name }) => (
+              <option key={id} value={id}>
+                {name}
+              </option>
+            ))}
+          </Select>
+        </Field>
+      )}
+      {chosen === 'json' && (
+        <>
+          <TextField
+            control={control}
+            name="netlistText"
+            label="Netlist"
+            lines={7}
+            isCode
+            isRequired
+            placeholder='{ "ohmstead": 1, "title": "…", "reference": "chassis", "parts": [ … ] }'
+          />
+          <FileButton
+            accept=".json,application/json"
+            onRead={(text) => onFile('netlistText', text)}
+          >
+            Choose a netlist file
+          </FileButton>
+        </>
+      )}
+      {chosen === 'csv' && (
+        <>
+          <TextField
+            control={control}
+            name="csv"
+            label="Table of parts"
+            hint="One part a line, with a heading line: ref, kind, from, to and its values."
+            lines={7}
+            isCode
+            isRequired
+          />
+          <FileButton accept=".csv,text/csv,text/plain" onRead={(text) => onFile('csv', text)}>
+            Choose a CSV file
+          </FileButton>
+          <TextField
+            control={control}
+            name="reference"
+            label="Reference node"
+            hint="Readings are taken against this node unless they say otherwise."
+            isRequired
+          />
+        </>
+      )}
+    </div>
+  );
+}
