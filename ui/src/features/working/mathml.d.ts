@@ -2,10 +2,9 @@ import { type HTMLAttributes } from 'react';
 
 // React renders MathML but does not declare its elements.
 declare module 'react' {
-  // eslint-disable-next-line @typescript-eslint/no-namespace
   namespace JSX {
     interface IntrinsicElements {
-      math: HTMLAttributes<MathMLElement>;
+      math: HTMLAttributes<MathMLElement> & { displaystyle?: 'true' | 'false' };
       mrow: HTMLAttributes<MathMLElement>;
       mi: HTMLAttributes<MathMLElement>;
       mn: HTMLAttributes<MathMLElement>;

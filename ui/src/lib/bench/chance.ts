@@ -58,12 +58,11 @@ export function gainInWords(bits: number): string {
  */
 export function deviationInWords(deviations: number): string {
   const size = Math.abs(deviations);
-  const side = deviations < 0 ? 'low' : 'high';
   if (size < 1) return 'well inside what tolerances allow';
   if (size < 2) return 'inside what tolerances allow';
-  if (size < 3) return `at the edge of what tolerances allow, ${side}`;
-  if (size < 6) return `outside what tolerances allow, ${side}`;
-  return `far outside what tolerances allow, ${side}`;
+  if (size < 3) return 'at the edge of what tolerances allow';
+  if (size < 6) return 'outside what tolerances allow';
+  return 'far outside what tolerances allow';
 }
 
 /**

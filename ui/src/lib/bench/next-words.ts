@@ -1,7 +1,6 @@
 import { type NextReading } from '@engine/diagnosis-types';
-import { type Netlist } from '@engine/netlist/types';
 import { gainInWords, minutesInWords } from './chance';
-import { labelForReading } from './places';
+import { type Labels, labelForReading } from './places';
 import { isPoweredReading } from './takes';
 
 /**
@@ -9,10 +8,7 @@ import { isPoweredReading } from './takes';
  *
  * @returns the engine's label, else "ohms across R1B, power off".
  */
-export function nextInWords(
-  netlist: Pick<Netlist, 'points' | 'reference'>,
-  next: NextReading,
-): string {
+export function nextInWords(netlist: Labels, next: NextReading): string {
   if (next.label) return next.label;
   if (next.take === 'sign') return labelForReading(netlist, next);
   return `${labelForReading(netlist, next)}, ${isPoweredReading(next.take) ? 'powered' : 'power off'}`;

@@ -15,15 +15,22 @@ export function placeKey(place: Place): string {
   return `${place.take} at ${(place.at ?? []).join(' ')}`;
 }
 
+/** What naming a place needs to know about a circuit. */
+export type Labels = Pick<Netlist, 'points' | 'reference' | 'line'>;
+
 /**
- * Gives the label of a node as the drawing prints it, or the node's own name.
+ * Gives the label of a node as a person calls it.
  *
  * @param netlist circuit with its points.
  * @param node name of a node.
- * @returns "V1 pin 4", or the name of the node when no point carries it.
+ * @returns "V1 pin 4", "the line" for its hot wire, "chassis", or the name of the node when no point
+ *   carries it.
  */
-export function labelForNode(netlist: Pick<Netlist, 'points'>, node: string): string {
-  return netlist.points?.find((point) => point.node === node)?.label ?? node;
+export function labelForNode(netlist: Partial<Labels>, node: string): string {
+  const label = netlist.points?.find((point) => point.node === node)?.label;
+  if (label) return label;
+  if (node === netlist.line?.hot) return 'the line';
+  return node === netlist.reference && /^chassis$/i.test(node) ? 'chassis' : node;
 }
 
 /**
@@ -33,10 +40,7 @@ export function labelForNode(netlist: Pick<Netlist, 'points'>, node: string): st
  * @param place leads or part.
  * @returns "across R1B", "in R1B" for amps, "at V1 pin 4", "from V1 pin 4 to V2 pin 3".
  */
-export function labelForPlace(
-  netlist: Pick<Netlist, 'points' | 'reference'>,
-  place: Place,
-): string {
+export function labelForPlace(netlist: Labels, place: Place): string {
   if (place.part) {
     if (place.take === 'amps') return `through ${place.part}`;
     return place.take === 'sign' || place.take === 'lifted-ohms'
@@ -55,10 +59,7 @@ export function labelForPlace(
  * @param place kind of reading with its leads or its part.
  * @returns "ohms across R1B", "AC volts at V1 pin 4", "how DS1 looks".
  */
-export function labelForReading(
-  netlist: Pick<Netlist, 'points' | 'reference'>,
-  place: Place,
-): string {
+export function labelForReading(netlist: Labels, place: Place): string {
   const take: Take = place.take;
   if (take === 'sign') return `how ${place.part} looks`;
   if (take === 'lifted-ohms') return `ohms of ${place.part} with one end lifted`;

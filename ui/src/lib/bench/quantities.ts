@@ -17,6 +17,19 @@ export function takenInWords(value: number | 'OL' | null | undefined, take: Take
   return formatQuantity(value, unit, 4);
 }
 
+/**
+ * Writes the two ends of an interval.
+ *
+ * @returns "82.5 to 91.4 V", or with both units where they differ: "980 Ω to 1.05 kΩ".
+ */
+export function intervalInWords(low: number, high: number, take: Take): string {
+  const { unit } = TAKE_WORDS[take];
+  if (!unit) return '–';
+  const [from, to] = [formatQuantity(low, unit, 3), formatQuantity(high, unit, 3)];
+  const [number, word] = from.split(' ');
+  return to.endsWith(` ${word}`) || low === 0 ? `${number} to ${to}` : `${from} to ${to}`;
+}
+
 /** Writes what was read: a value with its unit, or what was seen. */
 export function readingInWords(reading: Pick<CaseReading, 'take' | 'value' | 'seen'>): string {
   if (reading.seen) return SEEN_WORDS[reading.seen].word.toLowerCase();

@@ -20,13 +20,16 @@ interface CircuitSourceProps {
 /** Where the circuit of a new case comes from: a family, a netlist, or a table of parts. */
 export function CircuitSource({ control, families, familiesMessage, onFile }: CircuitSourceProps) {
   const styles = useStyles();
-  const source = useController({ control, name: 'source' });
-  const family = useController({ control, name: 'familyId' });
+  const { field: sourceField } = useController({ control, name: 'source' });
+  const {
+    field: { ref: familyRef, onBlur: leaveFamily, onChange: chooseFamily, value: familyId },
+    fieldState: familyState,
+  } = useController({ control, name: 'familyId' });
   const chosen = useWatch({ control, name: 'source' });
   return (
     <div className={styles.root}>
       <Field label="Circuit">
-        <RadioGroup value={chosen} onChange={(_event, { value }) => source.field.onChange(value)}>
+        <RadioGroup value={chosen} onChange={(_event, { value }) => sourceField.onChange(value)}>
           <Radio value="family" label="From a chassis family" />
           <Radio value="json" label="From a netlist (JSON)" />
           <Radio value="csv" label="From a table of parts (CSV)" />
@@ -37,14 +40,14 @@ export function CircuitSource({ control, families, familiesMessage, onFile }: Ci
           label="Family"
           required
           hint={familiesMessage}
-          validationMessage={family.fieldState.error?.message}
+          validationMessage={familyState.error?.message}
         >
           <Select
-            ref={family.field.ref}
+            ref={familyRef}
             size="large"
-            value={family.field.value}
-            onBlur={family.field.onBlur}
-            onChange={(_event, { value }) => family.field.onChange(value)}
+            value={familyId}
+            onBlur={leaveFamily}
+            onChange={(_event, { value }) => chooseFamily(value)}
           >
             <option value="">Choose a family</option>
             {families.map(({ id, name }) => (

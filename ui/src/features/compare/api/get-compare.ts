@@ -1,29 +1,6 @@
 import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query';
-import { type Take } from '@engine/netlist/types';
+import { type ComparePoint } from '@engine/diagnosis-types';
 import { apiClient } from '@/lib/api-client';
-
-/** Measured beside computed at one point or part. */
-export interface ComparePoint {
-  kind: 'point' | 'part';
-  /** Node or reference designator. */
-  key: string;
-  label: string;
-  take: Take;
-  at?: [string, string];
-  part?: string;
-  /** Healthy value as the meter would show it; null for over range. */
-  value: number | null;
-  /** 95 % interval of a healthy set. */
-  low: number | null;
-  high: number | null;
-  /** What the service literature prints. */
-  published?: number | null;
-  measured?: number | 'OL' | null;
-  /** (measured − value) / standard deviation. */
-  deviations?: number | null;
-  /** Place down the string or along the rails. */
-  order: number;
-}
 
 export interface Comparison {
   points: ComparePoint[];

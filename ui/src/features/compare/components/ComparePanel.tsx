@@ -1,21 +1,14 @@
 import { type Netlist, type Take } from '@engine/netlist/types';
-import {
-  Button,
-  makeStyles,
-  mergeClasses,
-  Spinner,
-  Tab,
-  TabList,
-  Text,
-  tokens,
-} from '@fluentui/react-components';
-import { useMemo, useRef, useState } from 'react';
+import { makeStyles, mergeClasses, Tab, TabList, Text, tokens } from '@fluentui/react-components';
+import { useRef, useState } from 'react';
+import { EmptyState } from '@/components/EmptyState';
+import { FailedState } from '@/components/FailedState';
+import { LoadingState } from '@/components/LoadingState';
 import { type CaseReading, revisionOfReadings } from '@/lib/bench/case-reading';
-import { problemInWords } from '@/lib/bench/problem';
 import { TAKE_WORDS } from '@/lib/bench/takes';
 import { useCompare } from '../api/get-compare';
 import { useWidth } from '../hooks/useWidth';
-import { pointsOf, takesOf } from '../plot/compare-model';
+import { plottedOf, pointsOf, takesOf } from '../plot/compare-model';
 import { plotOf } from '../plot/plot-geometry';
 import { CompareTable } from './CompareTable';
 import { PlotLegend } from './PlotLegend';
@@ -37,12 +30,6 @@ const useStyles = makeStyles({
   stale: { opacity: 0.6 },
   plot: { minWidth: 0, maxWidth: '900px' },
   tabs: { flexWrap: 'wrap' },
-  failed: {
-    display: 'flex',
-    flexDirection: 'column',
-    alignItems: 'flex-start',
-    gap: tokens.spacingVerticalM,
-  },
 });
 
 /** Measured against computed: a plot down the string, and the same values as a table. */
@@ -54,30 +41,24 @@ export function ComparePanel(props: ComparePanelProps) {
   const frame = useRef<HTMLDivElement>(null);
   const width = useWidth(frame);
 
-  const all = useMemo(() => compare.data?.points ?? [], [compare.data]);
+  const all = compare.data?.points ?? [];
   const takes = takesOf(all);
   const take = chosen && takes.includes(chosen) ? chosen : takes[0];
-  const points = useMemo(() => (take ? pointsOf(all, take) : []), [all, take]);
-  const plot = useMemo(() => {
-    const longest = Math.max(4, ...points.map(({ label }) => label.length)) * 7.2 + 16;
-    return plotOf(points, Math.max(280, width), Math.min(longest, Math.max(84, width * 0.3)));
-  }, [points, width]);
+  const points = take ? pointsOf(all, take) : [];
+  const drawn = plottedOf(points);
+  const longest = Math.max(4, ...drawn.map(({ label }) => label.length)) * 7.2 + 16;
+  const left = Math.min(longest, Math.max(84, width * 0.36));
+  const plot = plotOf(drawn, Math.max(280, width), left);
 
-  if (compare.isPending) return <Spinner label="Computing the healthy set" />;
+  if (compare.isPending) return <LoadingState label="Computing the healthy set" />;
   if (compare.isError && !compare.data) {
-    return (
-      <div role="alert" className={styles.failed}>
-        <Text>{problemInWords(compare.error)}</Text>
-        <Button onClick={() => void compare.refetch()}>Try again</Button>
-      </div>
-    );
+    return <FailedState error={compare.error} onRetry={() => void compare.refetch()} />;
   }
   if (!take) {
     return (
-      <Text>
-        There is nothing to compare yet. Give the circuit points for a lead, or enter a first
-        reading.
-      </Text>
+      <EmptyState title="Nothing to compare yet">
+        Give the circuit points for a lead, or enter a first reading.
+      </EmptyState>
     );
   }
   return (

@@ -1,8 +1,8 @@
 import { type Take } from '@engine/netlist/types';
 import { Button, makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
-import { takenInWords } from '@/lib/bench/quantities';
+import { intervalInWords, takenInWords } from '@/lib/bench/quantities';
 import { TAKE_WORDS } from '@/lib/bench/takes';
-import { type ComparePoint } from '../api/get-compare';
+import { type ComparePoint } from '@engine/diagnosis-types';
 import { deviationPhrase, verdictOf } from '../plot/compare-model';
 import { MARKS } from './StringPlot';
 
@@ -96,7 +96,7 @@ export function CompareTable({ points, take, onShowWorking }: CompareTableProps)
                 <td className={mergeClasses(styles.cell, styles.quiet)}>
                   {point.low === null || point.high === null
                     ? '–'
-                    : `${takenInWords(point.low, take)} to ${takenInWords(point.high, take)}`}
+                    : intervalInWords(point.low, point.high, take)}
                 </td>
                 {hasPublished && (
                   <td className={styles.cell}>{takenInWords(point.published, take)}</td>

@@ -1,7 +1,7 @@
 import { type Take } from '@engine/netlist/types';
 import { deviationInWords } from '@/lib/bench/chance';
 import { takenInWords } from '@/lib/bench/quantities';
-import { type ComparePoint } from '../api/get-compare';
+import { type ComparePoint } from '@engine/diagnosis-types';
 
 /** How far a reading lies off, for its mark; never said by colour alone. */
 export type Verdict = 'inside' | 'edge' | 'outside';
@@ -22,6 +22,18 @@ export function pointsOf(points: readonly ComparePoint[], take: Take): ComparePo
   return points
     .filter((point) => point.take === take)
     .sort((a, b) => Number(a.kind === 'part') - Number(b.kind === 'part') || a.order - b.order);
+}
+
+/**
+ * Chooses what is drawn: every point, and the parts that were measured; the table has the others too.
+ *
+ * Where a circuit has no points, all parts are drawn.
+ */
+export function plottedOf(points: readonly ComparePoint[]): ComparePoint[] {
+  const hasPoints = points.some(({ kind }) => kind === 'point');
+  return points.filter(
+    ({ kind, measured }) => !hasPoints || kind === 'point' || measured !== undefined,
+  );
 }
 
 /**

@@ -1,6 +1,6 @@
 import { scaleLinear, scaleSymlog } from 'd3-scale';
 import { area, line } from 'd3-shape';
-import { type ComparePoint } from '../api/get-compare';
+import { type ComparePoint } from '@engine/diagnosis-types';
 import { type Verdict, verdictOf } from './compare-model';
 
 /** Height of one row of the plot, px; also a target that a thumb meets. */

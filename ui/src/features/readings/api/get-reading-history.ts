@@ -23,6 +23,6 @@ export function readingHistoryQuery(caseId: string) {
 }
 
 /** History of a case's readings, asked for when it is looked at. */
-export function useReadingHistory(caseId: string, isWanted: boolean) {
-  return useQuery({ ...readingHistoryQuery(caseId), enabled: isWanted, staleTime: 0 });
+export function useReadingHistory(caseId: string) {
+  return useQuery({ ...readingHistoryQuery(caseId), staleTime: 0 });
 }

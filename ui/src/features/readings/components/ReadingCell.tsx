@@ -1,14 +1,13 @@
 import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
 import { type ClipboardEvent, type KeyboardEvent, useId } from 'react';
-import { labelForReading, type Place, placeKey } from '@/lib/bench/places';
+import { type Labels, labelForReading, type Place, placeKey } from '@/lib/bench/places';
 import { takenInWords } from '@/lib/bench/quantities';
-import { type Netlist } from '@engine/netlist/types';
 import { type GridMove } from '../grid/grid-moves';
 import { type CellEntry } from '../hooks/useReadingEntry';
 
 interface ReadingCellProps {
   place: Place;
-  netlist: Pick<Netlist, 'points' | 'reference'>;
+  netlist: Labels;
   entry: CellEntry;
   isReadOnly: boolean;
   /** True for the one cell of the grid that Tab reaches. */

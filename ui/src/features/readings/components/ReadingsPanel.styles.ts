@@ -22,10 +22,4 @@ export const useReadingsPanelStyles = makeStyles({
     minWidth: 0,
   },
   title: { margin: `${tokens.spacingVerticalS} 0 0` },
-  failed: {
-    display: 'flex',
-    flexDirection: 'column',
-    alignItems: 'flex-start',
-    gap: tokens.spacingVerticalM,
-  },
 });

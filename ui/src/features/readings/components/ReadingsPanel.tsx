@@ -1,10 +1,11 @@
 import { type NextReading } from '@engine/diagnosis-types';
 import { type AsFound, type Netlist } from '@engine/netlist/types';
-import { Button, Spinner, Text, Title3 } from '@fluentui/react-components';
+import { Button, Text, Title3 } from '@fluentui/react-components';
 import { ArrowUndoRegular, CalculatorRegular, TableRegular } from '@fluentui/react-icons';
 import { useEffect, useMemo, useRef, useState } from 'react';
+import { FailedState } from '@/components/FailedState';
+import { LoadingState } from '@/components/LoadingState';
 import { type Place, placeKey } from '@/lib/bench/places';
-import { problemInWords } from '@/lib/bench/problem';
 import { isPoweredReading } from '@/lib/bench/takes';
 import { useReadings } from '../api/get-readings';
 import { isBlock, parseBlock, placeBlock } from '../grid/block-paste';
@@ -50,7 +51,11 @@ export function ReadingsPanel(props: ReadingsPanelProps) {
   const query = useReadings(caseId);
   const readings = query.data ?? NO_READINGS;
   const [meterId, setMeterId] = useMeterChoice();
-  const entry = useReadingEntry(caseId, readings, meterId);
+  const netlist = useMemo(
+    () => withAdded(props.netlist, props.asFound),
+    [props.netlist, props.asFound],
+  );
+  const entry = useReadingEntry(caseId, netlist, readings, meterId);
   const sendState = useReadingSender(caseId);
   const isNarrow = useIsNarrow();
   const [mode, setMode] = useState<'grid' | 'bench'>();
@@ -60,10 +65,6 @@ export function ReadingsPanel(props: ReadingsPanelProps) {
   const root = useRef<HTMLDivElement>(null);
   const isBench = (mode ?? (isNarrow ? 'bench' : 'grid')) === 'bench';
 
-  const netlist = useMemo(
-    () => withAdded(props.netlist, props.asFound),
-    [props.netlist, props.asFound],
-  );
   const sections = useMemo(
     () => sectionsOf(netlist, [...readings, ...nextReadings, ...added]),
     [netlist, readings, nextReadings, added],
@@ -95,14 +96,9 @@ export function ReadingsPanel(props: ReadingsPanelProps) {
     if (target) requestAnimationFrame(() => focusPlace(root.current, target));
   };
 
-  if (query.isPending) return <Spinner label="Fetching the readings" />;
+  if (query.isPending) return <LoadingState label="Fetching the readings" />;
   if (query.isError && !query.data) {
-    return (
-      <div role="alert" className={styles.failed}>
-        <Text>{problemInWords(query.error)}</Text>
-        <Button onClick={() => void query.refetch()}>Try again</Button>
-      </div>
-    );
+    return <FailedState error={query.error} onRetry={() => void query.refetch()} />;
   }
   const next = nextReadings[0];
   return (
@@ -188,10 +184,9 @@ function withAdded(netlist: Netlist, asFound: readonly AsFound[] = []): Netlist 
 }
 
 function focusPlace(root: HTMLElement | null, place: Place): void {
-  const cells = root?.querySelectorAll<HTMLElement>(
-    `[data-place="${CSS.escape(placeKey(place))}"]`,
-  );
-  const cell = cells?.[0];
+  const key = placeKey(place);
+  const cells = [...(root?.querySelectorAll<HTMLElement>('[data-place]') ?? [])];
+  const cell = cells.find(({ dataset }) => dataset.place === key);
   cell?.scrollIntoView({ block: 'center', behavior: 'auto' });
   cell?.focus();
 }

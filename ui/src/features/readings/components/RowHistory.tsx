@@ -1,16 +1,12 @@
 import { type Netlist } from '@engine/netlist/types';
 import {
-  Button,
   makeStyles,
   Popover,
   PopoverSurface,
-  PopoverTrigger,
   Spinner,
   Text,
   tokens,
 } from '@fluentui/react-components';
-import { HistoryRegular } from '@fluentui/react-icons';
-import { useState } from 'react';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { labelForReading, placeKey } from '@/lib/bench/places';
 import { problemInWords } from '@/lib/bench/problem';
@@ -21,13 +17,13 @@ import { type GridRow } from '../grid/grid-model';
 interface RowHistoryProps {
   caseId: string;
   netlist: Netlist;
+  /** Row asked about and its button; one history is open at a time. */
   row: GridRow;
-  /** True in the row that the grid's focus is in, so that Tab goes on to it. */
-  isTabStop: boolean;
+  target: HTMLElement;
+  onClose: () => void;
 }
 
 const useStyles = makeStyles({
-  button: { '@media (pointer: coarse)': { minWidth: '44px', minHeight: '44px' } },
   surface: { maxWidth: 'min(340px, 90vw)', maxHeight: '50vh', overflowY: 'auto' },
   list: { margin: 0, padding: 0, listStyleType: 'none' },
   item: {
@@ -43,28 +39,26 @@ const useStyles = makeStyles({
   },
 });
 
-/** All readings ever taken in one row, asked for when it is opened. */
-export function RowHistory({ caseId, netlist, row, isTabStop }: RowHistoryProps) {
+/** All readings ever taken in one row, fetched when it is opened. */
+export function RowHistory({ caseId, netlist, row, target, onClose }: RowHistoryProps) {
   const styles = useStyles();
-  const [isOpen, setIsOpen] = useState(false);
-  const history = useReadingHistory(caseId, isOpen);
+  const history = useReadingHistory(caseId);
   const keys = new Set(Object.values(row.cells).map(placeKey));
   const readings = (history.data ?? [])
     .filter((reading) => keys.has(placeKey(reading)))
     .sort((a, b) => (b.takenAt ?? '').localeCompare(a.takenAt ?? ''));
 
   return (
-    <Popover open={isOpen} onOpenChange={(_event, { open }) => setIsOpen(open)} trapFocus>
-      <PopoverTrigger disableButtonEnhancement>
-        <Button
-          appearance="subtle"
-          size="small"
-          className={styles.button}
-          icon={<HistoryRegular />}
-          aria-label={`History of ${row.label}`}
-          tabIndex={isTabStop ? 0 : -1}
-        />
-      </PopoverTrigger>
+    <Popover
+      open
+      trapFocus
+      positioning={{ target, position: 'below', align: 'end' }}
+      onOpenChange={(_event, { open }) => {
+        if (open) return;
+        onClose();
+        target.focus();
+      }}
+    >
       <PopoverSurface className={styles.surface} aria-label={`History of ${row.label}`}>
         {history.isPending ? (
           <Spinner size="tiny" label="Looking it up" />

@@ -1,9 +1,10 @@
 import { type Netlist } from '@engine/netlist/types';
 import { mergeClasses } from '@fluentui/react-components';
+import { HistoryRegular } from '@fluentui/react-icons';
 import { useState } from 'react';
 import { type Place, placeKey } from '@/lib/bench/places';
 import { TAKE_WORDS } from '@/lib/bench/takes';
-import { type GridSection } from '../grid/grid-model';
+import { type GridRow, type GridSection } from '../grid/grid-model';
 import { type GridSpot, moveInGrid } from '../grid/grid-moves';
 import { type ReadingEntry } from '../hooks/useReadingEntry';
 import { ReadingCell } from './ReadingCell';
@@ -29,6 +30,7 @@ export function SectionTable(props: SectionTableProps) {
   const { section, netlist, entry, isReadOnly, next } = props;
   const styles = useSectionTableStyles();
   const [stop, setStop] = useState<GridSpot>(() => firstCell(section));
+  const [asked, setAsked] = useState<{ row: GridRow; target: HTMLElement }>();
   const nextKey = next && placeKey(next);
 
   const move = (from: GridSpot, element: HTMLElement, way: Parameters<typeof moveInGrid>[2]) => {
@@ -83,6 +85,7 @@ export function SectionTable(props: SectionTableProps) {
                 const spot = { row: rowIndex, column };
                 const common = {
                   place,
+                  netlist,
                   entry: entry.entryOf(place),
                   isReadOnly,
                   isTabStop: stop.row === rowIndex && stop.column === column,
@@ -106,7 +109,6 @@ export function SectionTable(props: SectionTableProps) {
                     ) : (
                       <ReadingCell
                         {...common}
-                        netlist={netlist}
                         onType={(text) => entry.type(place, text)}
                         onEnter={() => entry.enter(place)}
                         onRevert={() => entry.revert(place)}
@@ -118,17 +120,29 @@ export function SectionTable(props: SectionTableProps) {
                 );
               })}
               <td className={styles.historyColumn}>
-                <RowHistory
-                  caseId={props.caseId}
-                  netlist={netlist}
-                  row={row}
-                  isTabStop={stop.row === rowIndex}
-                />
+                <button
+                  type="button"
+                  className={styles.history}
+                  aria-label={`History of ${row.label}`}
+                  aria-haspopup="dialog"
+                  tabIndex={stop.row === rowIndex ? 0 : -1}
+                  onClick={(event) => setAsked({ row, target: event.currentTarget })}
+                >
+                  <HistoryRegular fontSize={18} />
+                </button>
               </td>
             </tr>
           ))}
         </tbody>
       </table>
+      {asked && (
+        <RowHistory
+          caseId={props.caseId}
+          netlist={netlist}
+          {...asked}
+          onClose={() => setAsked(undefined)}
+        />
+      )}
     </div>
   );
 }

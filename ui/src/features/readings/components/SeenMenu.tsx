@@ -1,24 +1,14 @@
 import { type Seen } from '@engine/netlist/types';
-import {
-  Button,
-  makeStyles,
-  Menu,
-  MenuDivider,
-  MenuItem,
-  MenuList,
-  MenuPopover,
-  MenuTrigger,
-  mergeClasses,
-  tokens,
-} from '@fluentui/react-components';
+import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
 import { type KeyboardEvent } from 'react';
-import { labelForReading, type Place, placeKey } from '@/lib/bench/places';
+import { type Labels, labelForReading, type Place, placeKey } from '@/lib/bench/places';
 import { SEEN_WORDS } from '@/lib/bench/takes';
 import { type GridMove } from '../grid/grid-moves';
 import { type CellEntry } from '../hooks/useReadingEntry';
 
 interface SeenMenuProps {
   place: Place;
+  netlist: Labels;
   entry: CellEntry;
   /** Which looks are offered: those at a dead set or those at a powered one. */
   isPowered: boolean;
@@ -31,15 +21,29 @@ interface SeenMenuProps {
 }
 
 const useStyles = makeStyles({
-  button: {
+  root: {
+    boxSizing: 'border-box',
     width: '100%',
     minWidth: '104px',
-    minHeight: '34px',
-    justifyContent: 'flex-start',
-    fontWeight: tokens.fontWeightRegular,
-    paddingLeft: tokens.spacingHorizontalS,
-    paddingRight: tokens.spacingHorizontalS,
-    '@media (pointer: coarse)': { minHeight: '44px' },
+    height: '34px',
+    padding: `0 ${tokens.spacingHorizontalXS}`,
+    border: '1px solid transparent',
+    borderBottomColor: tokens.colorNeutralStroke2,
+    borderRadius: tokens.borderRadiusMedium,
+    backgroundColor: 'transparent',
+    color: tokens.colorNeutralForeground1,
+    fontFamily: 'inherit',
+    fontSize: tokens.fontSizeBase300,
+    '& option': {
+      backgroundColor: tokens.colorNeutralBackground1,
+      color: tokens.colorNeutralForeground1,
+    },
+    ':hover': { backgroundColor: tokens.colorNeutralBackground1Hover },
+    ':focus-visible': {
+      outline: `2px solid ${tokens.colorStrokeFocus2}`,
+      outlineOffset: '-1px',
+    },
+    '@media (pointer: coarse)': { height: '44px' },
   },
   empty: { color: tokens.colorNeutralForeground4 },
   pending: { fontStyle: 'italic' },
@@ -47,6 +51,7 @@ const useStyles = makeStyles({
     border: `2px dashed ${tokens.colorBrandStroke1}`,
     backgroundColor: tokens.colorBrandBackground2,
   },
+  error: { margin: 0, color: tokens.colorStatusDangerForeground1, whiteSpace: 'normal' },
 });
 
 const MOVES: Partial<Record<string, GridMove>> = {
@@ -56,16 +61,17 @@ const MOVES: Partial<Record<string, GridMove>> = {
   ArrowRight: 'right',
 };
 
-/** How a part looks, chosen from the few words there are for it. */
+/** How a part looks, chosen from the few words there are for it. Space opens the list. */
 export function SeenMenu(props: SeenMenuProps) {
-  const { place, entry, isPowered } = props;
+  const { place, netlist, entry, isPowered } = props;
   const styles = useStyles();
   const words = (Object.keys(SEEN_WORDS) as Seen[]).filter(
     (seen) => SEEN_WORDS[seen].isPowered === isPowered,
   );
-  const shown =
-    entry.seen && SEEN_WORDS[entry.seen].isPowered === isPowered ? entry.seen : undefined;
+  const { seen } = entry;
+  const shown = seen && SEEN_WORDS[seen].isPowered === isPowered ? seen : undefined;
 
+  // Arrows move in the grid as in every other cell; changing the value in passing would be a trap.
   const handleKeyDown = (event: KeyboardEvent) => {
     const move = MOVES[event.key];
     if (!move || event.altKey) return;
@@ -74,41 +80,35 @@ export function SeenMenu(props: SeenMenuProps) {
   };
 
   return (
-    <Menu>
-      <MenuTrigger disableButtonEnhancement>
-        <Button
-          appearance="subtle"
-          size="small"
-          className={mergeClasses(
-            styles.button,
-            !shown && styles.empty,
-            entry.isPending && styles.pending,
-            props.isNext && styles.next,
-          )}
-          data-place={placeKey(place)}
-          data-look={isPowered ? 'powered' : 'cold'}
-          aria-label={`${labelForReading({ reference: '' }, place)}: ${
-            shown ? SEEN_WORDS[shown].word : 'not looked at'
-          }`}
-          tabIndex={props.isTabStop ? 0 : -1}
-          disabledFocusable={props.isReadOnly}
-          onKeyDown={handleKeyDown}
-          onFocus={props.onFocus}
-        >
-          {shown ? SEEN_WORDS[shown].word : 'Look'}
-        </Button>
-      </MenuTrigger>
-      <MenuPopover>
-        <MenuList>
-          {words.map((seen) => (
-            <MenuItem key={seen} onClick={() => props.onSee(seen)}>
-              {SEEN_WORDS[seen].word}
-            </MenuItem>
-          ))}
-          {entry.seen && <MenuDivider />}
-          {entry.seen && <MenuItem onClick={() => props.onSee(undefined)}>Take it back</MenuItem>}
-        </MenuList>
-      </MenuPopover>
-    </Menu>
+    <>
+      <select
+        className={mergeClasses(
+          styles.root,
+          !shown && styles.empty,
+          entry.isPending && styles.pending,
+          props.isNext && styles.next,
+        )}
+        data-place={placeKey(place)}
+        aria-label={`${labelForReading(netlist, place)}, ${isPowered ? 'powered' : 'power off'}`}
+        tabIndex={props.isTabStop ? 0 : -1}
+        disabled={props.isReadOnly}
+        value={shown ?? ''}
+        onChange={(event) => props.onSee((event.target.value || undefined) as Seen | undefined)}
+        onKeyDown={handleKeyDown}
+        onFocus={props.onFocus}
+      >
+        <option value="">–</option>
+        {words.map((word) => (
+          <option key={word} value={word}>
+            {SEEN_WORDS[word].word}
+          </option>
+        ))}
+      </select>
+      {entry.error && (
+        <p role="alert" className={styles.error}>
+          {entry.error}
+        </p>
+      )}
+    </>
   );
 }

@@ -98,14 +98,14 @@ function pointsOf(netlist: Netlist): string[] {
 }
 
 function pointRow(netlist: Netlist, node: string, takes: Take[]): GridRow {
-  const label = node === netlist.line?.hot ? 'Line' : labelForNode(netlist, node);
+  const label = labelForNode(netlist, node);
+  const against = `against ${labelForNode(netlist, netlist.reference)}`;
   const at: [string, string] = [node, netlist.reference];
   return {
     id: `point ${node}`,
     kind: 'point',
-    label,
-    detail:
-      label === node ? `against ${netlist.reference}` : `${node}, against ${netlist.reference}`,
+    label: label[0].toUpperCase() + label.slice(1),
+    detail: label === node ? against : `${node}, ${against}`,
     cells: Object.fromEntries(takes.map((take) => [take, { take, at }])),
   };
 }
@@ -126,7 +126,7 @@ function leadsRow(netlist: Netlist, id: string, place: Place): GridRow {
   return {
     id,
     kind: 'leads',
-    label,
+    label: label[0].toUpperCase() + label.slice(1),
     detail: `red on ${place.at?.[0]}, black on ${place.at?.[1]}`,
     cells: { [place.take]: place },
   };

@@ -1,4 +1,4 @@
-import { type Seen } from '@engine/netlist/types';
+import { type Netlist, type Seen } from '@engine/netlist/types';
 import { useCallback, useMemo, useState } from 'react';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { type Place, placeKey } from '@/lib/bench/places';
@@ -44,11 +44,13 @@ const NO_DRAFTS: Record<string, string> = {};
  * Turns typing into readings: drafts while typing, checked when entered, kept until the service has them.
  *
  * @param caseId id of the case.
+ * @param netlist circuit with the parts added as found.
  * @param readings readings as the service keeps them.
  * @param meterId meter that new values are taken with.
  */
 export function useReadingEntry(
   caseId: string,
+  netlist: Netlist,
   readings: readonly CaseReading[],
   meterId: string | undefined,
 ): ReadingEntry {
@@ -129,7 +131,7 @@ export function useReadingEntry(
       if (text.trim() === '') {
         change(place, null);
       } else {
-        const checked = checkEntry(text, place.take);
+        const checked = checkEntry(text, place, netlist);
         if (!checked.ok) {
           setDraft(caseId, key, text);
           setError(key, checked.message);

@@ -9,6 +9,7 @@ import {
   MessageBarTitle,
   tokens,
 } from '@fluentui/react-components';
+import { LightbulbRegular } from '@fluentui/react-icons';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { labelForReading, type Place } from '@/lib/bench/places';
 import { readingInWords } from '@/lib/bench/quantities';
@@ -25,13 +26,12 @@ const useStyles = makeStyles({
   button: { '@media (pointer: coarse)': { minHeight: '44px' } },
 });
 
-/** What is to be said about the whole: cautions, none of these, readings to take again, remarks, advice. */
+/** What comes before the suspects: cautions, "none of these", readings to take again. */
 export function DiagnosisRemarks(props: DiagnosisRemarksProps) {
   const { result, readings, netlist, onEnterReading } = props;
   const styles = useStyles();
   const again = result.retake.flatMap((index) => readings[index] ?? []);
   const cautions = result.advice.filter(({ effect }) => effect === 'caution');
-  const advice = result.advice.filter(({ effect }) => effect === 'advice');
   const bars = [
     ...cautions.map(({ rule, text, because }) => (
       <MessageBar key={rule} intent="warning" layout="multiline">
@@ -72,21 +72,32 @@ export function DiagnosisRemarks(props: DiagnosisRemarksProps) {
         )}
       </MessageBar>
     )),
-    ...result.remarks.map((remark) => (
-      <MessageBar key={remark} intent="info" layout="multiline">
-        <MessageBarBody>{remark}</MessageBarBody>
-      </MessageBar>
-    )),
-    ...advice.map(({ rule, text, because }) => (
-      <MessageBar key={rule} intent="success" layout="multiline">
-        <MessageBarBody>
-          <MessageBarTitle>Advice</MessageBarTitle>
-          {text} {because}
-        </MessageBarBody>
-      </MessageBar>
-    )),
   ].filter(Boolean);
   return bars.length > 0 ? <div className={styles.root}>{bars}</div> : null;
+}
+
+/** What follows the suspects: remarks on the whole and the advice of rules. */
+export function DiagnosisAdvice({ result }: Pick<DiagnosisRemarksProps, 'result'>) {
+  const styles = useStyles();
+  const advice = result.advice.filter(({ effect }) => effect === 'advice');
+  if (advice.length === 0 && result.remarks.length === 0) return null;
+  return (
+    <div className={styles.root}>
+      {advice.map(({ rule, text, because }) => (
+        <MessageBar key={rule} intent="info" layout="multiline" icon={<LightbulbRegular />}>
+          <MessageBarBody>
+            <MessageBarTitle>Advice</MessageBarTitle>
+            {text} {because}
+          </MessageBarBody>
+        </MessageBar>
+      ))}
+      {result.remarks.map((remark) => (
+        <MessageBar key={remark} intent="info" layout="multiline">
+          <MessageBarBody>{remark}</MessageBarBody>
+        </MessageBar>
+      ))}
+    </div>
+  );
 }
 
 function capital(text: string): string {

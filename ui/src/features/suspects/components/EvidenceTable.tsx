@@ -1,6 +1,6 @@
 import { type Suspect } from '@engine/diagnosis-types';
 import { type Netlist } from '@engine/netlist/types';
-import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
+import { makeStyles, mergeClasses, Text, tokens } from '@fluentui/react-components';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { labelForReading } from '@/lib/bench/places';
 import { readingInWords } from '@/lib/bench/quantities';
@@ -40,10 +40,13 @@ export function EvidenceTable({ suspect, readings, netlist }: EvidenceTableProps
   if (rows.length === 0) return null;
   return (
     <div className={styles.scroll}>
+      <Text size={200} block className={styles.head}>
+        More or less likely than if nothing were wrong, the loudest first.
+      </Text>
       <table className={styles.table} aria-label={`Readings for and against ${suspect.title}`}>
         <thead>
           <tr>
-            {['Reading', 'Measured', 'Would show', 'Than with nothing wrong'].map((title) => (
+            {['Reading', 'Measured', 'Would show', 'How it speaks'].map((title) => (
               <th key={title} scope="col" className={mergeClasses(styles.cell, styles.head)}>
                 {title}
               </th>
@@ -57,7 +60,7 @@ export function EvidenceTable({ suspect, readings, netlist }: EvidenceTableProps
                 {labelForReading(netlist, reading)}
               </th>
               <td className={mergeClasses(styles.cell, styles.value)}>{readingInWords(reading)}</td>
-              <td className={mergeClasses(styles.cell, styles.value)}>
+              <td className={styles.cell}>
                 {reading.take === 'sign' ? '–' : wouldShowInWords(evidence, reading)}
               </td>
               <td

@@ -1,18 +1,14 @@
 import { type Netlist } from '@engine/netlist/types';
-import {
-  Button,
-  makeStyles,
-  mergeClasses,
-  Spinner,
-  Text,
-  tokens,
-} from '@fluentui/react-components';
+import { makeStyles, mergeClasses, Text, tokens } from '@fluentui/react-components';
 import { type ReactNode, useId, useMemo } from 'react';
+import { EmptyState } from '@/components/EmptyState';
+import { FailedState } from '@/components/FailedState';
+import { LoadingState } from '@/components/LoadingState';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { type Place } from '@/lib/bench/places';
 import { problemInWords } from '@/lib/bench/problem';
 import { useDiagnosis } from '../api/get-diagnosis';
-import { DiagnosisRemarks } from './DiagnosisRemarks';
+import { DiagnosisAdvice, DiagnosisRemarks } from './DiagnosisRemarks';
 import { NextReadings } from './NextReadings';
 import { PartChances } from './PartChances';
 import { SuspectGroups } from './SuspectGroups';
@@ -35,12 +31,6 @@ const useStyles = makeStyles({
   root: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalL, minWidth: 0 },
   stale: { opacity: 0.6 },
   status: { minHeight: '20px', color: tokens.colorNeutralForeground3 },
-  failed: {
-    display: 'flex',
-    flexDirection: 'column',
-    alignItems: 'flex-start',
-    gap: tokens.spacingVerticalM,
-  },
   heading: {
     margin: `0 0 ${tokens.spacingVerticalS}`,
     fontSize: tokens.fontSizeBase400,
@@ -63,21 +53,16 @@ export function SuspectsPanel(props: SuspectsPanelProps) {
 
   if (readings.length === 0) {
     return (
-      <Text>
-        No readings yet. Enter a first one, best a cold one, and the suspects appear here.
-      </Text>
+      <EmptyState title="No readings yet">
+        Enter a first one, best with the power off, and the suspects appear here.
+      </EmptyState>
     );
   }
   if (!data) {
     if (diagnosis.isError) {
-      return (
-        <div role="alert" className={styles.failed}>
-          <Text>{problemInWords(diagnosis.error)}</Text>
-          <Button onClick={() => void diagnosis.refetch()}>Try again</Button>
-        </div>
-      );
+      return <FailedState error={diagnosis.error} onRetry={() => void diagnosis.refetch()} />;
     }
-    return <Spinner label="Weighing the readings" />;
+    return <LoadingState label="Weighing the readings" />;
   }
   const { result } = data;
   return (
@@ -116,6 +101,7 @@ export function SuspectsPanel(props: SuspectsPanelProps) {
           onEnterReading={onEnterReading}
         />
       </Block>
+      <DiagnosisAdvice result={result} />
       {result.parts.length > 0 && (
         <Block title="Part by part">
           <PartChances parts={result.parts} onSelectPart={onSelectPart} />

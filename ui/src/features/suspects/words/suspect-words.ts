@@ -2,7 +2,7 @@ import { type NextReading, type ReadingEvidence, type Suspect } from '@engine/di
 import { formatQuantity } from '@engine/units';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { timesInWords } from '@/lib/bench/chance';
-import { takenInWords } from '@/lib/bench/quantities';
+import { intervalInWords, takenInWords } from '@/lib/bench/quantities';
 
 /** Suspects side by side that the readings so far cannot tell apart. */
 export interface SuspectGroup {
@@ -41,7 +41,7 @@ export function groupsOf(suspects: readonly Suspect[]): SuspectGroup[] {
 /**
  * Finds the suggested readings that would tell the members of a group apart.
  *
- * A reading counts when its reason names parts of at least two members, or of one with two members in all.
+ * Those whose reason names two members; where there are none, those taken on a member.
  *
  * @returns at most two, best first.
  */
@@ -50,14 +50,11 @@ export function separatorsOf(
   nextReadings: readonly NextReading[],
 ): NextReading[] {
   const parts = group.suspects.map(({ faults }) => faults.map(({ part }) => part));
-  return nextReadings
-    .filter((next) => {
-      const named = parts.filter((refs) =>
-        refs.some((ref) => names(next.why, ref) || next.part === ref),
-      );
-      return named.length >= 2 || (named.length === 1 && parts.length <= 3);
-    })
-    .slice(0, 2);
+  const between = nextReadings.filter(
+    ({ why }) => parts.filter((refs) => refs.some((ref) => names(why, ref))).length >= 2,
+  );
+  const onMember = nextReadings.filter(({ part }) => part && parts.flat().includes(part));
+  return (between.length > 0 ? between : onMember).slice(0, 2);
 }
 
 function names(text: string, ref: string): boolean {
@@ -94,7 +91,7 @@ export function neededValueInWords(fault: Suspect['faults'][number]): string | n
 /**
  * Says what a reading would show under a suspect.
  *
- * @returns "118 V (112 V to 121 V)", "OL".
+ * @returns "118 V (112 to 121 V)", "OL".
  */
 export function wouldShowInWords(
   evidence: ReadingEvidence,
@@ -103,7 +100,7 @@ export function wouldShowInWords(
   if (evidence.predicted === null) return 'OL';
   const centre = takenInWords(evidence.predicted, reading.take);
   if (evidence.low === undefined || evidence.high === undefined) return centre;
-  return `${centre} (${takenInWords(evidence.low, reading.take)} to ${takenInWords(evidence.high, reading.take)})`;
+  return `${centre} (${intervalInWords(evidence.low, evidence.high, reading.take)})`;
 }
 
 /** Says how a reading speaks: by how many times, or that only a slip would explain it. */

@@ -49,7 +49,11 @@ const useStyles = makeStyles({
 /** One reading as a formula in one part's value: what would this part have to measure? */
 export function ClosedFormForm({ caseId, netlist, readings, part }: ClosedFormFormProps) {
   const styles = useStyles();
-  const usable = readings.filter(({ take, value }) => take !== 'sign' && typeof value === 'number');
+  // The line itself hangs on no part.
+  const usable = readings.filter(
+    ({ take, value, at }) =>
+      take !== 'sign' && typeof value === 'number' && at?.[0] !== netlist.line?.hot,
+  );
   const [chosenPart, setChosenPart] = useState(part ?? netlist.parts[0]?.ref ?? '');
   const [chosenReading, setChosenReading] = useState('');
   const closedForm = useClosedForm(caseId);

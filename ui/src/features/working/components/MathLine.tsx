@@ -5,9 +5,9 @@ import { MathTree } from './MathTree';
 
 const useStyles = makeStyles({
   root: {
-    display: 'block',
     padding: `${tokens.spacingVerticalXS} 0`,
     overflowX: 'auto',
+    overflowY: 'hidden',
     fontSize: tokens.fontSizeBase400,
   },
   text: {
@@ -23,8 +23,10 @@ export function MathLine({ text }: { text: string }) {
   const tree = useMemo(() => toMathTree(text), [text]);
   if (!tree) return <code className={styles.text}>{text}</code>;
   return (
-    <math className={styles.root} aria-label={text}>
-      <MathTree tree={tree} />
-    </math>
+    <div className={styles.root}>
+      <math displaystyle="true" aria-label={text}>
+        <MathTree tree={tree} />
+      </math>
+    </div>
   );
 }

@@ -1,16 +1,10 @@
 import { type Netlist } from '@engine/netlist/types';
 import { formatQuantity } from '@engine/units';
-import {
-  Button,
-  makeStyles,
-  mergeClasses,
-  Spinner,
-  Text,
-  tokens,
-} from '@fluentui/react-components';
+import { makeStyles, mergeClasses, Text, tokens } from '@fluentui/react-components';
+import { FailedState } from '@/components/FailedState';
+import { LoadingState } from '@/components/LoadingState';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { labelForNode } from '@/lib/bench/places';
-import { problemInWords } from '@/lib/bench/problem';
 import { useWorking } from '../api/get-working';
 import { ClosedFormForm } from './ClosedFormForm';
 import { MathLine } from './MathLine';
@@ -40,7 +34,7 @@ const useStyles = makeStyles({
     color: tokens.colorNeutralForeground3,
     fontSize: tokens.fontSizeBase200,
   },
-  equation: { margin: 0, minWidth: 0, overflowX: 'auto', textAlign: 'left' },
+  equation: { margin: 0, minWidth: 0 },
   table: { borderCollapse: 'collapse' },
   cell: {
     padding: `${tokens.spacingVerticalXS} ${tokens.spacingHorizontalL} ${tokens.spacingVerticalXS} 0`,
@@ -50,12 +44,6 @@ const useStyles = makeStyles({
   },
   value: { textAlign: 'right', fontVariantNumeric: 'tabular-nums' },
   list: { margin: 0, paddingLeft: tokens.spacingHorizontalL },
-  failed: {
-    display: 'flex',
-    flexDirection: 'column',
-    alignItems: 'flex-start',
-    gap: tokens.spacingVerticalM,
-  },
   disagree: { color: tokens.colorStatusDangerForeground1 },
 });
 
@@ -63,14 +51,9 @@ const useStyles = makeStyles({
 export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: WorkingPanelProps) {
   const styles = useStyles();
   const query = useWorking(caseId, caseVersion);
-  if (query.isPending) return <Spinner label="Setting up the equations" />;
+  if (query.isPending) return <LoadingState label="Setting up the equations" />;
   if (query.isError && !query.data) {
-    return (
-      <div role="alert" className={styles.failed}>
-        <Text>{problemInWords(query.error)}</Text>
-        <Button onClick={() => void query.refetch()}>Try again</Button>
-      </div>
-    );
+    return <FailedState error={query.error} onRetry={() => void query.refetch()} />;
   }
   const working = query.data;
   const solution = Object.entries(working.solution);
