@@ -51,7 +51,7 @@ export const LIMITS = {
   /** From every node to the reference, so that a floating island still has a voltage. */
   leastSiemens: 1e-12,
   /** Series resistance of a capacitor, as a fraction of its reactance at line frequency. */
-  leastEsr: 1e-4,
+  leastEsr: 1e-5,
   /** Resistance across a choke's inductance (core loss), in multiples of its reactance. */
   chokeLoss: 1e3,
   /** Leakage of a blocked rectifier; without it a bridge's floating source has no voltage of its own. */

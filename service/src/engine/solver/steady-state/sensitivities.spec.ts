@@ -72,7 +72,7 @@ describe.each(Object.entries(BLOCKS))('derivatives of %s', (name, { elements, no
       requests.forEach((request, r) => {
         const difference = (valueOf(up, request) - valueOf(down, request)) / (2 * step);
         // One in a thousand of the reading, or of the largest voltage where a reading is next to nothing.
-        const size = 'element' in request ? 0.1 : scale;
+        const size = 'element' in request ? 1 : scale;
         const allowed =
           0.02 * Math.abs(difference) + 1e-3 * Math.abs(valueOf(state, request)) + 3e-6 * size;
         expect(Math.abs(result[r * parameters.length + p] - difference)).toBeLessThan(allowed);

@@ -20,7 +20,8 @@ export interface ParameterOf {
  * section 2). The deviation is made periodic with the derivative of the cycle, and what loads,
  * heaters, lamps and thermistors do in turn is solved for on top.
  *
- * About four digits at the default step.
+ * About three digits at the default step. Where a waveform reaches its peak twice (two equal halves
+ * of a full-wave supply), the derivative of a peak-to-peak value is that of one of the two.
  *
  * @returns requests×parameters by rows: change of the reading per relative change of the figure.
  */

@@ -71,7 +71,7 @@ export const fullWave: Block = {
   nodes: 6,
   elements: [
     source(1, 0, 330, 70),
-    source(2, 0, 330, 74, 180),
+    source(2, 0, 328, 74, 180),
     rectifier(1, 3, 14, 130),
     rectifier(2, 3, 14, 130),
     capacitor(3, 0, 20e-6, 2),
@@ -103,15 +103,18 @@ export const doubler: Block = {
   ],
 };
 
-/** Bridge on a floating winding. */
+/**
+ * Bridge on a floating winding. Its halves differ a little: with equal ones the peak of a waveform is
+ * reached twice, and a derivative of it exists to one side only.
+ */
 export const bridge: Block = {
   nodes: 5,
   elements: [
     source(1, 2, 12, 0.5),
     rectifier(1, 3, 0.7, 0.1),
-    rectifier(2, 3, 0.7, 0.1),
-    rectifier(0, 1, 0.7, 0.1),
-    rectifier(0, 2, 0.7, 0.1),
+    rectifier(2, 3, 0.75, 0.1),
+    rectifier(0, 1, 0.72, 0.1),
+    rectifier(0, 2, 0.76, 0.1),
     capacitor(3, 0, 1e-3),
     resistance(3, 4, 10),
     capacitor(4, 0, 470e-6),
@@ -124,7 +127,7 @@ export const chokeInput: Block = {
   nodes: 6,
   elements: [
     source(1, 0, 350, 60),
-    source(2, 0, 350, 62, 180),
+    source(2, 0, 346, 62, 180),
     rectifier(1, 3, 14, 100),
     rectifier(2, 3, 14, 100),
     choke(3, 4, 8, 150),
