@@ -15,10 +15,10 @@ export const paths = {
   signIn: (returnTo?: string) =>
     returnTo && returnTo !== '/' ? `/sign-in?to=${encodeURIComponent(returnTo)}` : '/sign-in',
   invitation: (token: string) => `/invitation/${encodeURIComponent(token)}`,
-  case: (id: string, section: CaseSection = 'intake') =>
+  case: (id: string | number, section: CaseSection = 'intake') =>
     `/cases/${encodeURIComponent(id)}/${section}`,
   families: '/families',
-  family: (id: string) => `/families/${encodeURIComponent(id)}`,
+  family: (id: string | number) => `/families/${encodeURIComponent(id)}`,
   rules: '/rules',
   partsData: '/parts-data',
   people: '/people',

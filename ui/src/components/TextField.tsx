@@ -18,12 +18,14 @@ interface TextFieldProps<Values extends FieldValues> {
 
 /** One text field of a form, tied to its label, hint and error. */
 export function TextField<Values extends FieldValues>(props: TextFieldProps<Values>) {
-  const { field, fieldState } = useController({ control: props.control, name: props.name });
+  const {
+    field: { ref, name, value, onBlur, onChange },
+    fieldState,
+  } = useController({ control: props.control, name: props.name });
   const shared = {
-    ref: field.ref,
-    name: field.name,
-    value: (field.value as string | undefined) ?? '',
-    onBlur: field.onBlur,
+    name,
+    value: (value as string | undefined) ?? '',
+    onBlur,
     placeholder: props.placeholder,
     autoComplete: props.autoComplete,
   };
@@ -36,18 +38,20 @@ export function TextField<Values extends FieldValues>(props: TextFieldProps<Valu
     >
       {props.lines && props.lines > 1 ? (
         <Textarea
+          ref={ref}
           {...shared}
           rows={props.lines}
           resize="vertical"
           textarea={props.isCode ? { style: { fontFamily: 'monospace' } } : undefined}
-          onChange={(_event, { value }) => field.onChange(value)}
+          onChange={(_event, data) => onChange(data.value)}
         />
       ) : (
         <Input
+          ref={ref}
           {...shared}
           size="large"
           type={props.type}
-          onChange={(_event, { value }) => field.onChange(value)}
+          onChange={(_event, data) => onChange(data.value)}
         />
       )}
     </Field>

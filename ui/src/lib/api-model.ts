@@ -1,5 +1,8 @@
 import { type FaultMode, type AsFound, type Netlist } from '@engine/netlist/types';
 
+/** Ids are numbers given by the service. */
+export type Id = number;
+
 /** What a person may do in the shop, from least to most. */
 export const ROLES = ['trainee', 'technician', 'senior', 'owner'] as const;
 export type Role = (typeof ROLES)[number];
@@ -8,7 +11,7 @@ export type Role = (typeof ROLES)[number];
 export type Abilities = Record<string, boolean>;
 
 export interface Person {
-  id: string;
+  id: Id;
   name: string;
   email: string;
   role: Role;
@@ -26,23 +29,21 @@ export interface SignedIn {
 }
 
 export interface PersonRef {
-  id: string;
+  id: Id;
   name: string;
 }
 
-export const CASE_STATES = ['open', 'waiting', 'closed'] as const;
-export type CaseState = string;
-
 export interface CaseSummary {
-  id: string;
+  id: Id;
   number: number | string;
   set: string;
   complaint: string;
-  state: CaseState;
+  /** `open` and `closed`, and whatever else the shop has between. */
+  state: string;
   openedAt: string;
   openedBy?: PersonRef | null;
   assignedTo?: PersonRef | null;
-  familyId?: string | null;
+  familyId?: Id | null;
   familyName?: string | null;
 }
 
@@ -69,28 +70,32 @@ export interface Case extends CaseSummary {
 }
 
 export interface FamilySummary {
-  id: string;
+  id: Id;
   name: string;
   kind: string;
   tags?: string[];
+  description?: string | null;
   version?: number;
+  /** How many parts the circuit has. */
+  parts?: number;
+  /** Tube types that the circuit names. */
+  tubes?: string[];
   solvedCases?: number;
 }
 
 export interface Family extends FamilySummary {
-  description?: string | null;
   version: number;
   netlist: Netlist;
-  versions: { version: number; by?: PersonRef | string | null; at: string; note?: string | null }[];
+  versions: { version: number; by?: string | null; at: string; note?: string | null }[];
   solved?: {
     cases: number;
-    faults: { part: string; mode: FaultMode; count?: number; cases?: number }[];
+    faults: { part: string; mode: FaultMode; count: number }[];
   };
   abilities: Abilities;
 }
 
 export interface RuleSummary {
-  id: string;
+  id: string | number;
   pack: string;
   name: string;
   sentence: string;
@@ -108,7 +113,7 @@ export interface RuleList {
 }
 
 export interface PartFact {
-  id?: string;
+  id?: string | number;
   type: string;
   source: string;
   status: string;

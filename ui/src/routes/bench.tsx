@@ -35,7 +35,7 @@ export function Component() {
   const families = useFamilies();
   const isNarrow = useMediaQuery('(max-width: 899px)');
   const isFiltered = filter.search !== '' || filter.isMine || filter.state !== 'open';
-  const linkTo = (id: string) => paths.case(id);
+  const linkTo = (id: number) => paths.case(id);
   const open = (
     <Button appearance="primary" size="large" onClick={() => setIsOpening(true)}>
       Open a case

@@ -9,5 +9,5 @@ export const emailField = z
 /** A password that is being chosen. */
 export const newPasswordField = z
   .string()
-  .min(12, 'Choose at least 12 characters; a short sentence is easy to remember.')
-  .max(200, 'Choose at most 200 characters.');
+  .min(10, 'A password needs at least 10 characters. A few words make a good one.')
+  .max(72, 'Choose at most 72 characters.');

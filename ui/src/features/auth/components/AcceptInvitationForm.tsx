@@ -38,7 +38,7 @@ export function AcceptInvitationForm({ token, onSignedIn }: AcceptInvitationForm
         control={control}
         name="password"
         label="Choose a password"
-        hint="At least 12 characters."
+        hint="At least 10 characters."
         type="password"
         autoComplete="new-password"
       />

@@ -37,7 +37,7 @@ export function SetUpShopForm({ onSignedIn }: { onSignedIn: (signedIn: SignedIn)
         control={control}
         name="password"
         label="Password"
-        hint="At least 12 characters."
+        hint="At least 10 characters."
         type="password"
         autoComplete="new-password"
       />

@@ -61,8 +61,8 @@ export function readDocument(
   return { ok: false, message: 'A netlist is one JSON object, from { to }.' };
 }
 
-async function circuitOf(form: OpenCaseForm): Promise<{ familyId?: string; netlist?: Netlist }> {
-  if (form.source === 'family') return { familyId: form.familyId };
+async function circuitOf(form: OpenCaseForm): Promise<{ familyId?: number; netlist?: Netlist }> {
+  if (form.source === 'family') return { familyId: Number(form.familyId) };
   if (form.source === 'json') {
     const read = readDocument(form.netlistText);
     return read.ok ? { netlist: read.netlist } : {};

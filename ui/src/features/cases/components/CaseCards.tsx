@@ -33,7 +33,7 @@ const useStyles = makeStyles({
 interface CaseCardsProps {
   cases: readonly CaseSummary[];
   /** Address of a case. */
-  linkTo: (id: string) => string;
+  linkTo: (id: number) => string;
 }
 
 /** Cases as cards, one below the other, for narrow screens. */

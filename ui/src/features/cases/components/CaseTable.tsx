@@ -13,7 +13,7 @@ const useStyles = makeStyles({
 interface CaseTableProps {
   cases: readonly CaseSummary[];
   /** Address of a case. */
-  linkTo: (id: string) => string;
+  linkTo: (id: number) => string;
 }
 
 /** Cases as a table, for screens with room; the same cases stand as cards where there is none. */

@@ -83,7 +83,7 @@ export function CircuitSource({ control, families, familiesMessage, onFile }: Ci
             control={control}
             name="csv"
             label="Table of parts"
-            hint="One part a line, with a heading line: ref, kind, from, to and its values."
+            hint="One part a line, with a heading line: ref, kind, from, to, value, rating, and so on."
             lines={7}
             isCode
             isRequired
