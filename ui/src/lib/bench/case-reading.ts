@@ -2,19 +2,18 @@ import { type Reading } from '@engine/netlist/types';
 
 /** A reading as a case keeps it. */
 export interface CaseReading extends Reading {
-  id: string;
+  id: number;
   /** Id given where it was typed, so that sending it twice stores it once. */
-  clientId?: string | null;
-  meterId?: string | null;
-  note?: string | null;
+  clientId?: string;
+  note?: string;
+  /** Name of the person who took it. */
+  takenBy?: string;
   /** When it was taken, ISO 8601. */
   takenAt?: string;
-  /** Name of the person who took it. */
-  takenBy?: { id: string; name: string } | null;
-  /** Set when a later reading at the same place replaced it. */
-  replacedAt?: string | null;
-  /** Set when it was taken back. */
-  withdrawnAt?: string | null;
+  /** True when a later reading at the same place counts instead. */
+  isReplaced?: boolean;
+  /** True when it was taken back. */
+  isWithdrawn?: boolean;
 }
 
 /**
@@ -26,6 +25,6 @@ export interface CaseReading extends Reading {
 export function revisionOfReadings(readings: readonly Pick<CaseReading, 'id'>[]): string {
   return readings
     .map((reading) => reading.id)
-    .sort()
+    .sort((a, b) => a - b)
     .join(',');
 }

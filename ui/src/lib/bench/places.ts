@@ -5,6 +5,15 @@ import { TAKE_WORDS } from './takes';
 export type Place = Pick<Reading, 'take' | 'at' | 'part'>;
 
 /**
+ * Takes the place out of a reading or a suggestion.
+ *
+ * @returns a new object with nothing else in it.
+ */
+export function placeOf({ take, at, part }: Place): Place {
+  return part ? { take, part } : { take, at };
+}
+
+/**
  * Names a place by one string, equal for two readings that replace each other.
  *
  * @param place kind of reading with its leads or its part.

@@ -28,6 +28,17 @@ export interface ComparePanelProps {
 const useStyles = makeStyles({
   root: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalM, minWidth: 0 },
   stale: { opacity: 0.6 },
+  sheet: {
+    display: 'flex',
+    flexDirection: 'column',
+    gap: tokens.spacingVerticalM,
+    minWidth: 0,
+    padding: tokens.spacingHorizontalL,
+    borderRadius: tokens.borderRadiusLarge,
+    border: `1px solid ${tokens.colorNeutralStroke2}`,
+    backgroundColor: tokens.colorNeutralBackground1,
+    '@media (max-width: 640px)': { padding: tokens.spacingHorizontalM },
+  },
   plot: { minWidth: 0, maxWidth: '900px' },
   tabs: { flexWrap: 'wrap' },
 });
@@ -79,16 +90,20 @@ export function ComparePanel(props: ComparePanelProps) {
           </Tab>
         ))}
       </TabList>
-      <div className={styles.plot} ref={frame}>
-        <StringPlot plot={plot} take={take} />
+      <div className={styles.sheet}>
+        <div className={styles.plot} ref={frame}>
+          <StringPlot plot={plot} take={take} />
+        </div>
+        <PlotLegend />
+        {plot.isCompressed && (
+          <Text size={200}>
+            Large values stand closer together on this scale, so that small ones can be told apart.
+          </Text>
+        )}
       </div>
-      <PlotLegend />
-      {plot.isCompressed && (
-        <Text size={200}>
-          Large values stand closer together on this scale, so that small ones can be told apart.
-        </Text>
-      )}
-      <CompareTable points={points} take={take} onShowWorking={onShowWorking} />
+      <div className={styles.sheet}>
+        <CompareTable points={points} take={take} onShowWorking={onShowWorking} />
+      </div>
       <Text size={200}>
         Computed for a healthy set at {compare.data?.lineVolts} V line, with the meter in place.
       </Text>

@@ -4,7 +4,7 @@ import { apiClient } from '@/lib/api-client';
 
 /** A meter that somebody keeps at the bench. */
 export interface OwnMeter extends Meter {
-  id: string;
+  id: number;
   name: string;
 }
 

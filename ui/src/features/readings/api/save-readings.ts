@@ -10,7 +10,7 @@ export interface NewReading {
   part?: string;
   value?: number | 'OL';
   seen?: Seen;
-  meterId?: string;
+  meterId?: number;
 }
 
 /**

@@ -2,7 +2,7 @@ import { type NextReading } from '@engine/diagnosis-types';
 import { type Netlist, type Seen } from '@engine/netlist/types';
 import { Button, Select, Text } from '@fluentui/react-components';
 import { ChevronLeftRegular, ChevronRightRegular } from '@fluentui/react-icons';
-import { labelForReading, type Place, placeKey } from '@/lib/bench/places';
+import { labelForReading, type Place, placeKey, placeOf } from '@/lib/bench/places';
 import { takenInWords } from '@/lib/bench/quantities';
 import { isPoweredReading, SEEN_WORDS, TAKE_WORDS } from '@/lib/bench/takes';
 import { type GridSection, placesOf } from '../grid/grid-model';
@@ -34,10 +34,11 @@ export function BenchEntry(props: BenchEntryProps) {
     places: uniquePlaces(section),
   }));
   const places = groups.flatMap((group) => group.places);
-  const place = props.place ?? nextReadings[0] ?? places[0];
-  if (!place) {
+  const shown = props.place ?? nextReadings[0] ?? places[0];
+  if (!shown) {
     return <Text>This circuit has no place for a lead yet. Add parts to it first.</Text>;
   }
+  const place = placeOf(shown);
   const key = placeKey(place);
   const index = places.findIndex((other) => placeKey(other) === key);
   const cell = entry.entryOf(place);

@@ -3,8 +3,8 @@ import { useId } from 'react';
 import { useMeters } from '../api/get-meters';
 
 interface MeterPickerProps {
-  meterId: string | undefined;
-  onChoose: (id: string | undefined) => void;
+  meterId: number | undefined;
+  onChoose: (id: number | undefined) => void;
 }
 
 const useStyles = makeStyles({
@@ -42,7 +42,7 @@ export function MeterPicker({ meterId, onChoose }: MeterPickerProps) {
         className={styles.select}
         value={isKnown ? (meterId ?? '') : ''}
         aria-describedby={meters.isError ? noteId : undefined}
-        onChange={(_event, { value }) => onChoose(value || undefined)}
+        onChange={(_event, { value }) => onChoose(value ? Number(value) : undefined)}
       >
         {options}
       </Select>

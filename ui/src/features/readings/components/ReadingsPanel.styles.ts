@@ -20,6 +20,11 @@ export const useReadingsPanelStyles = makeStyles({
     flexDirection: 'column',
     gap: tokens.spacingVerticalS,
     minWidth: 0,
+    padding: tokens.spacingHorizontalL,
+    borderRadius: tokens.borderRadiusLarge,
+    border: `1px solid ${tokens.colorNeutralStroke2}`,
+    backgroundColor: tokens.colorNeutralBackground1,
+    '@media (max-width: 640px)': { padding: tokens.spacingHorizontalM },
   },
-  title: { margin: `${tokens.spacingVerticalS} 0 0` },
+  title: { margin: 0 },
 });

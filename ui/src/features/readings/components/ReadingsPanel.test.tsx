@@ -13,6 +13,7 @@ vi.mock('@/lib/api-client', () => ({
   apiClient: { get: vi.fn(), post: vi.fn(), delete: vi.fn() },
 }));
 const client = vi.mocked(apiClient);
+let nextId = 100;
 
 function panel(props: Partial<ReadingsPanelProps> = {}) {
   return (
@@ -46,7 +47,7 @@ beforeEach(() => {
   client.post.mockImplementation(async (_url, body) => ({
     data: (body as { readings: NewReading[] }).readings.map((reading) => ({
       ...reading,
-      id: `stored ${reading.clientId}`,
+      id: nextId++,
     })),
   }));
   client.delete.mockResolvedValue({ data: undefined });
@@ -145,7 +146,7 @@ describe('ReadingsPanel', () => {
     renderPanel(panel());
     await userEvent.clear(await cell('ohms at Dropper lug 1'));
     await userEvent.keyboard('{Enter}');
-    await waitFor(() => expect(client.delete).toHaveBeenCalledWith('/cases/c1/readings/r2'));
+    await waitFor(() => expect(client.delete).toHaveBeenCalledWith('/cases/c1/readings/2'));
     expect(await cell('ohms at Dropper lug 1')).toHaveValue('');
   });
 

@@ -85,7 +85,7 @@ export function RowHistory({ caseId, netlist, row, target, onClose }: RowHistory
 }
 
 function isPast(reading: CaseReading): boolean {
-  return !!reading.replacedAt || !!reading.withdrawnAt;
+  return !!reading.isReplaced || !!reading.isWithdrawn;
 }
 
 function noteOf(reading: CaseReading): string {
@@ -95,6 +95,6 @@ function noteOf(reading: CaseReading): string {
         timeStyle: 'short',
       })
     : '';
-  const state = reading.withdrawnAt ? 'taken back' : reading.replacedAt ? 'replaced later' : '';
-  return [reading.takenBy?.name, when, state].filter(Boolean).join(', ');
+  const state = reading.isWithdrawn ? 'taken back' : reading.isReplaced ? 'replaced later' : '';
+  return [reading.takenBy, when, state].filter(Boolean).join(', ');
 }

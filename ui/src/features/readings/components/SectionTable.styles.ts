@@ -3,7 +3,12 @@ import { makeStyles, tokens } from '@fluentui/react-components';
 /** Styles of the readings' grid. */
 export const useSectionTableStyles = makeStyles({
   scroll: { overflowX: 'auto', maxWidth: '100%' },
-  table: { borderCollapse: 'collapse', fontSize: tokens.fontSizeBase300 },
+  table: {
+    borderCollapse: 'collapse',
+    width: '100%',
+    maxWidth: '860px',
+    fontSize: tokens.fontSizeBase300,
+  },
   head: {
     padding: `${tokens.spacingVerticalXS} ${tokens.spacingHorizontalS}`,
     textAlign: 'right',

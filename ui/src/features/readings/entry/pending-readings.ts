@@ -10,9 +10,9 @@ export interface PendingReading {
   place: Place;
   value?: number | 'OL';
   seen?: Seen;
-  meterId?: string;
+  meterId?: number;
   /** Id of the stored reading to take back instead of storing one. */
-  withdraws?: string;
+  withdraws?: number;
   /** Sentence of the service when it refused this one; it is not sent again by itself. */
   refusal?: string;
 }

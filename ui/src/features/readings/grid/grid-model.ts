@@ -1,7 +1,7 @@
 import { type Netlist, type Take } from '@engine/netlist/types';
 import { railsIn, separate } from '@/lib/bench/graph';
 import { KIND_WORDS, partValue } from '@/lib/bench/part-words';
-import { labelForNode, labelForPlace, type Place, placeKey } from '@/lib/bench/places';
+import { labelForNode, labelForPlace, type Place, placeKey, placeOf } from '@/lib/bench/places';
 import { isPoweredReading } from '@/lib/bench/takes';
 
 /** A row of the grid: one point, one part, or another pair of leads. */
@@ -52,7 +52,7 @@ export function sectionsOf(netlist: Netlist, others: readonly Place[] = []): Gri
     const section = sections[isPoweredReading(place.take) ? 1 : 0];
     const id = `leads ${place.at.join(' ')}`;
     const row = section.rows.find((other) => other.id === id);
-    if (row) row.cells[place.take] = place;
+    if (row) row.cells[place.take] = placeOf(place);
     else section.rows.push(leadsRow(netlist, id, place));
   }
   return sections.map((section) => ({
@@ -128,7 +128,7 @@ function leadsRow(netlist: Netlist, id: string, place: Place): GridRow {
     kind: 'leads',
     label: label[0].toUpperCase() + label.slice(1),
     detail: `red on ${place.at?.[0]}, black on ${place.at?.[1]}`,
-    cells: { [place.take]: place },
+    cells: { [place.take]: placeOf(place) },
   };
 }
 

@@ -7,12 +7,17 @@ const STORAGE_KEY = 'ohmstead.meter';
  *
  * @returns the meter's id, undefined for the usual digital one, and the way to choose another.
  */
-export function useMeterChoice(): [string | undefined, (id: string | undefined) => void] {
-  const [meterId, setMeterId] = useState(() => localStorage.getItem(STORAGE_KEY) ?? undefined);
-  const choose = (id: string | undefined) => {
+export function useMeterChoice(): [number | undefined, (id: number | undefined) => void] {
+  const [meterId, setMeterId] = useState(readChoice);
+  const choose = (id: number | undefined) => {
     setMeterId(id);
-    if (id) localStorage.setItem(STORAGE_KEY, id);
+    if (id) localStorage.setItem(STORAGE_KEY, String(id));
     else localStorage.removeItem(STORAGE_KEY);
   };
   return [meterId, choose];
+}
+
+function readChoice(): number | undefined {
+  const id = Number(localStorage.getItem(STORAGE_KEY));
+  return Number.isInteger(id) && id > 0 ? id : undefined;
 }

@@ -52,7 +52,7 @@ export function useReadingEntry(
   caseId: string,
   netlist: Netlist,
   readings: readonly CaseReading[],
-  meterId: string | undefined,
+  meterId: number | undefined,
 ): ReadingEntry {
   const pending = usePendingReadings((state) => state.pending[caseId] ?? NONE) as PendingReading[];
   const drafts = usePendingReadings((state) => state.drafts[caseId] ?? NO_DRAFTS);

@@ -113,7 +113,7 @@ function updateReadings(
   queryClient: QueryClient,
   caseId: string,
   stored: readonly CaseReading[],
-  withdrawn?: string,
+  withdrawn?: number,
 ): void {
   const keys = new Set(stored.map(placeKey));
   queryClient.setQueryData(readingsQuery(caseId).queryKey, (old: CaseReading[] | undefined) => [

@@ -6,14 +6,14 @@ import { useSettled } from '../hooks/useSettled';
 
 /** A diagnosis as the service stores it. */
 export interface Diagnosis {
-  id: string;
+  id: number;
   /** When it was made, ISO 8601. */
   at: string;
   engineVersion: string;
   ms: number;
   result: DiagnosisResult;
   /** Readings it was made from, in the order that `ReadingEvidence.reading` counts. */
-  readingIds: string[];
+  readingIds: number[];
 }
 
 /** How long readings must rest before the diagnosis is asked for again, in ms. */

@@ -11,7 +11,7 @@ import {
 } from '@fluentui/react-components';
 import { LightbulbRegular } from '@fluentui/react-icons';
 import { type CaseReading } from '@/lib/bench/case-reading';
-import { labelForReading, type Place } from '@/lib/bench/places';
+import { labelForReading, type Place, placeOf } from '@/lib/bench/places';
 import { readingInWords } from '@/lib/bench/quantities';
 
 interface DiagnosisRemarksProps {
@@ -62,9 +62,7 @@ export function DiagnosisRemarks(props: DiagnosisRemarksProps) {
             <Button
               size="small"
               className={styles.button}
-              onClick={() =>
-                onEnterReading({ take: reading.take, at: reading.at, part: reading.part })
-              }
+              onClick={() => onEnterReading(placeOf(reading))}
             >
               Enter it again
             </Button>

@@ -24,6 +24,7 @@ const useStyles = makeStyles({
     fontWeight: tokens.fontWeightRegular,
   },
   head: { color: tokens.colorNeutralForeground3, fontWeight: tokens.fontWeightSemibold },
+  note: { color: tokens.colorNeutralForeground3 },
   value: { fontVariantNumeric: 'tabular-nums', whiteSpace: 'nowrap' },
   strong: { fontWeight: tokens.fontWeightSemibold },
 });
@@ -40,7 +41,7 @@ export function EvidenceTable({ suspect, readings, netlist }: EvidenceTableProps
   if (rows.length === 0) return null;
   return (
     <div className={styles.scroll}>
-      <Text size={200} block className={styles.head}>
+      <Text size={200} block className={styles.note}>
         More or less likely than if nothing were wrong, the loudest first.
       </Text>
       <table className={styles.table} aria-label={`Readings for and against ${suspect.title}`}>

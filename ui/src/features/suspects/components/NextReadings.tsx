@@ -2,7 +2,7 @@ import { type NextReading } from '@engine/diagnosis-types';
 import { type Netlist } from '@engine/netlist/types';
 import { Button, makeStyles, Text, tokens } from '@fluentui/react-components';
 import { effortInWords, nextInWords, whyInWords } from '@/lib/bench/next-words';
-import { type Place } from '@/lib/bench/places';
+import { type Place, placeOf } from '@/lib/bench/places';
 
 interface NextReadingsProps {
   netlist: Netlist;
@@ -54,7 +54,7 @@ export function NextReadings({ netlist, nextReadings, onEnterReading }: NextRead
                 size="small"
                 className={styles.button}
                 aria-label={`Enter this reading: ${label}`}
-                onClick={() => onEnterReading({ take: next.take, at: next.at, part: next.part })}
+                onClick={() => onEnterReading(placeOf(next))}
               >
                 Enter this reading
               </Button>

@@ -13,7 +13,7 @@ const post = vi.mocked(apiClient.post);
 function answer(overrides = {}) {
   return {
     data: {
-      id: 'd1',
+      id: 1,
       at: '2026-01-01T00:00:00Z',
       engineVersion: 'test',
       ms: 40,
@@ -70,7 +70,7 @@ describe('SuspectsPanel', () => {
       name: 'Enter this reading: ohms across R1B, power off',
     });
     await userEvent.click(button);
-    expect(onEnterReading).toHaveBeenCalledWith({ take: 'ohms', at: undefined, part: 'R1B' });
+    expect(onEnterReading).toHaveBeenCalledWith({ take: 'ohms', part: 'R1B' });
   });
 
   it('says cautions, what to take again, remarks and waiting rules', async () => {
@@ -91,7 +91,7 @@ describe('SuspectsPanel', () => {
     const { rerender } = renderPanel(panel());
     await screen.findByRole('article', { name: 'R1B open' });
     post.mockReturnValue(new Promise(() => {}));
-    rerender(panel({ readings: [...consoleReadings, { ...consoleReadings[0], id: 'r9' }] }));
+    rerender(panel({ readings: [...consoleReadings, { ...consoleReadings[0], id: 9 }] }));
     expect(await screen.findByText('Weighing the readings again…')).toBeInTheDocument();
     expect(screen.getByRole('article', { name: 'R1B open' })).toBeInTheDocument();
     await vi.waitFor(() => expect(post).toHaveBeenCalledTimes(2));

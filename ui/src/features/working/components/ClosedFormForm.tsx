@@ -57,7 +57,7 @@ export function ClosedFormForm({ caseId, netlist, readings, part }: ClosedFormFo
   const [chosenPart, setChosenPart] = useState(part ?? netlist.parts[0]?.ref ?? '');
   const [chosenReading, setChosenReading] = useState('');
   const closedForm = useClosedForm(caseId);
-  const reading = usable.find(({ id }) => id === chosenReading) ?? usable[0];
+  const reading = usable.find(({ id }) => String(id) === chosenReading) ?? usable[0];
 
   if (!reading) {
     return <Text>Enter a reading with a value first; then it can be traced to one part.</Text>;

@@ -5,7 +5,7 @@ import { MathTree } from './MathTree';
 
 const useStyles = makeStyles({
   root: {
-    padding: `${tokens.spacingVerticalXS} 0`,
+    padding: `${tokens.spacingVerticalS} 0`,
     overflowX: 'auto',
     overflowY: 'hidden',
     fontSize: tokens.fontSizeBase400,

@@ -21,6 +21,13 @@ export interface WorkingPanelProps {
 
 const useStyles = makeStyles({
   root: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalL, minWidth: 0 },
+  sheet: {
+    padding: tokens.spacingHorizontalL,
+    borderRadius: tokens.borderRadiusLarge,
+    border: `1px solid ${tokens.colorNeutralStroke2}`,
+    backgroundColor: tokens.colorNeutralBackground1,
+    '@media (max-width: 640px)': { padding: tokens.spacingHorizontalM },
+  },
   heading: {
     margin: `0 0 ${tokens.spacingVerticalS}`,
     fontSize: tokens.fontSizeBase400,
@@ -59,7 +66,7 @@ export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: W
   const solution = Object.entries(working.solution);
   return (
     <div className={styles.root}>
-      <section aria-label="Trace a reading to a part">
+      <section className={styles.sheet} aria-label="Trace a reading to a part">
         <h3 className={styles.heading}>What would this part have to be?</h3>
         <ClosedFormForm
           key={part}
@@ -69,7 +76,7 @@ export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: W
           part={part}
         />
       </section>
-      <section aria-label="Equations">
+      <section className={styles.sheet} aria-label="Equations">
         <h3 className={styles.heading}>Equations</h3>
         <p className={styles.intro}>
           At every node the currents that come in are the currents that go out. Heaters and lamps
@@ -88,7 +95,7 @@ export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: W
         )}
       </section>
       {solution.length > 0 && (
-        <section aria-label="Solution">
+        <section className={styles.sheet} aria-label="Solution">
           <h3 className={styles.heading}>Solution</h3>
           <table className={styles.table} aria-label="Solution of the equations">
             <tbody>
@@ -106,7 +113,7 @@ export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: W
           </table>
         </section>
       )}
-      <section aria-label="How far to trust it">
+      <section className={styles.sheet} aria-label="How far to trust it">
         <h3 className={styles.heading}>How far to trust it</h3>
         <ul className={styles.list}>
           <li className={working.agreesWithSolver ? undefined : styles.disagree}>
