@@ -3,7 +3,7 @@ import { apiClient } from '@/lib/api-client';
 import { type CaseSummary } from '@/lib/api-model';
 
 export interface CaseFilter {
-  /** Empty for every state. */
+  /** `open` for all that are not closed, `closed`, or `all`. */
   state: string;
   /** Found in number, set and complaint. */
   search: string;
@@ -17,7 +17,7 @@ export function casesQuery(filter: CaseFilter) {
     queryKey: ['cases', 'list', filter],
     queryFn: async ({ signal }) => {
       const params = {
-        state: filter.state || undefined,
+        state: filter.state,
         search: filter.search || undefined,
         mine: filter.isMine || undefined,
       };

@@ -40,7 +40,7 @@ export function CaseFilters({ filter, onChange }: CaseFiltersProps) {
         >
           <option value="open">Open cases</option>
           <option value="closed">Closed cases</option>
-          <option value="">All cases</option>
+          <option value="all">All cases</option>
         </Select>
       </Field>
       <Checkbox

@@ -1,0 +1,48 @@
+import { makeStyles, Text, tokens } from '@fluentui/react-components';
+import { StatusBadge } from '@/components/StatusBadge';
+import { type RuleSummary } from '@/lib/api-model';
+
+const useStyles = makeStyles({
+  card: {
+    display: 'flex',
+    flexDirection: 'column',
+    gap: tokens.spacingVerticalS,
+    padding: tokens.spacingHorizontalL,
+    backgroundColor: tokens.colorNeutralBackground1,
+    border: `1px solid ${tokens.colorNeutralStroke2}`,
+    borderRadius: tokens.borderRadiusLarge,
+  },
+  top: {
+    display: 'flex',
+    flexWrap: 'wrap',
+    justifyContent: 'space-between',
+    alignItems: 'center',
+    gap: tokens.spacingHorizontalM,
+  },
+  name: { margin: 0, fontSize: tokens.fontSizeBase400, lineHeight: tokens.lineHeightBase400 },
+  sentence: { maxWidth: '68ch' },
+  quiet: { color: tokens.colorNeutralForeground3, maxWidth: '68ch' },
+});
+
+/** One rule: what it says, why, and who says so. */
+export function RuleCard({ rule }: { rule: RuleSummary }) {
+  const styles = useStyles();
+  return (
+    <li className={styles.card}>
+      <div className={styles.top}>
+        <h3 className={styles.name}>{rule.name}</h3>
+        <StatusBadge tone={rule.effect === 'caution' ? 'warn' : 'calm'}>
+          {rule.effect.replaceAll('-', ' ')}
+        </StatusBadge>
+      </div>
+      <Text className={styles.sentence}>{rule.sentence}</Text>
+      <Text className={styles.sentence}>
+        <strong>Because:</strong> {rule.because}
+      </Text>
+      <Text size={200} className={styles.quiet}>
+        {rule.source ? `Source: ${rule.source}` : 'No source is given.'} Version {rule.version}
+        {rule.state === 'published' ? '.' : `, ${rule.state}.`}
+      </Text>
+    </li>
+  );
+}
