@@ -9,7 +9,7 @@ import { paths } from './paths';
 import { useShellStyles } from './Shell.styles';
 
 /** The frame around every screen: skip link, ways to go, who is signed in. */
-export function Shell() {
+export function Component() {
   const styles = useShellStyles();
   const { data: person } = useSession();
   const main = useRef<HTMLElement>(null);

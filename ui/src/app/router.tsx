@@ -2,7 +2,6 @@ import { type RouteObject } from 'react-router-dom';
 import { LoadingState } from '@/components/LoadingState';
 import { RouteError } from './RouteError';
 import { RequireSession } from './RequireSession';
-import { Shell } from './Shell';
 
 /** Every address and the screen that answers it; screens load when they are first wanted. */
 export const routes: RouteObject[] = [
@@ -16,7 +15,7 @@ export const routes: RouteObject[] = [
         Component: RequireSession,
         children: [
           {
-            Component: Shell,
+            lazy: () => import('./Shell'),
             children: [
               {
                 ErrorBoundary: RouteError,

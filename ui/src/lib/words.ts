@@ -43,6 +43,18 @@ export const FAULT_WORDS: Record<FaultMode, string> = {
   'no-load': 'draws nothing',
 };
 
+const STATES: Record<string, { word: string; tone: StatusTone }> = {
+  waiting: { word: 'Waiting', tone: 'calm' },
+  'on-the-bench': { word: 'On the bench', tone: 'busy' },
+  'waiting-for-customer': { word: 'Waits for the customer', tone: 'warn' },
+  'waiting-for-parts': { word: 'Waits for parts', tone: 'warn' },
+  proof: { word: 'In proof', tone: 'busy' },
+  closed: { word: 'Closed', tone: 'done' },
+};
+
+/** States that an open case can be given; closing is a step of its own. */
+export const OPEN_STATES = Object.keys(STATES).filter((state) => state !== 'closed');
+
 /**
  * Names a case's state.
  *
@@ -50,10 +62,7 @@ export const FAULT_WORDS: Record<FaultMode, string> = {
  * @returns the word shown and how it is toned.
  */
 export function stateInWords(state: string): { word: string; tone: StatusTone } {
-  if (state === 'open') return { word: 'Open', tone: 'busy' };
-  if (state === 'closed') return { word: 'Closed', tone: 'done' };
-  const word = state.replaceAll('-', ' ');
-  return { word: word.charAt(0).toUpperCase() + word.slice(1), tone: 'warn' };
+  return STATES[state] ?? { word: state.replaceAll('-', ' '), tone: 'calm' };
 }
 
 const DAY = new Intl.DateTimeFormat('en', { day: 'numeric', month: 'short', year: 'numeric' });

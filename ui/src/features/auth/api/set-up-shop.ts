@@ -1,13 +1,15 @@
 import { useMutation } from '@tanstack/react-query';
-import { z } from 'zod';
+import * as z from 'zod/mini';
 import { apiClient } from '@/lib/api-client';
 import { type SignedIn } from '@/lib/api-model';
 import { emailField, newPasswordField } from './fields';
 
 /** What the first start of an empty shop takes. */
 export const setUpShopSchema = z.object({
-  shopName: z.string().trim().min(1, 'Type the name of the shop.').max(120),
-  name: z.string().trim().min(1, 'Type your name.').max(120),
+  shopName: z
+    .string()
+    .check(z.trim(), z.minLength(1, 'Type the name of the shop.'), z.maxLength(120)),
+  name: z.string().check(z.trim(), z.minLength(1, 'Type your name.'), z.maxLength(120)),
   email: emailField,
   password: newPasswordField,
 });

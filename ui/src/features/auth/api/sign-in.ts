@@ -1,12 +1,12 @@
 import { useMutation } from '@tanstack/react-query';
-import { z } from 'zod';
+import * as z from 'zod/mini';
 import { apiClient } from '@/lib/api-client';
 import { type SignedIn } from '@/lib/api-model';
 
 /** What signing in takes. */
 export const signInSchema = z.object({
-  email: z.string().trim().min(1, 'Type your e-mail address.'),
-  password: z.string().min(1, 'Type your password.'),
+  email: z.string().check(z.trim(), z.minLength(1, 'Type your e-mail address.')),
+  password: z.string().check(z.minLength(1, 'Type your password.')),
 });
 export type SignInInput = z.infer<typeof signInSchema>;
 

@@ -1,6 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { type Netlist } from '@engine/netlist/types';
-import { z } from 'zod';
+import { type Line, type Netlist } from '@engine/netlist/types';
+import * as z from 'zod/mini';
 import { apiClient } from '@/lib/api-client';
 import { type Case } from '@/lib/api-model';
 import { readQuantity } from '@/components/QuantityInput';
@@ -11,18 +11,31 @@ export const CIRCUIT_SOURCES = ['family', 'json', 'csv'] as const;
 /** What the form for a new case holds. */
 export const openCaseSchema = z
   .object({
-    set: z.string().trim().min(1, 'Say which set is on the bench.').max(200),
-    complaint: z.string().trim().min(1, 'Say what is wrong with it, in a sentence.').max(2000),
+    set: z
+      .string()
+      .check(z.trim(), z.minLength(1, 'Say which set is on the bench.'), z.maxLength(200)),
+    complaint: z
+      .string()
+      .check(
+        z.trim(),
+        z.minLength(1, 'Say what is wrong with it, in a sentence.'),
+        z.maxLength(2000),
+      ),
     source: z.enum(CIRCUIT_SOURCES),
     familyId: z.string(),
     netlistText: z.string(),
     csv: z.string(),
     reference: z.string(),
+    hot: z.string(),
+    return: z.string(),
+    designVolts: z.string(),
+    hertz: z.string(),
     lineVolts: z.string(),
   })
-  .superRefine((form, context) => {
-    const refuse = (path: keyof typeof form, message: string) =>
-      context.addIssue({ code: 'custom', path: [path], message });
+  .check((context) => {
+    const form = context.value;
+    const refuse = (field: keyof typeof form, message: string) =>
+      context.issues.push({ code: 'custom', path: [field], message, input: form[field] });
     if (form.source === 'family' && !form.familyId) refuse('familyId', 'Choose a family.');
     if (form.source === 'json') {
       const read = readDocument(form.netlistText);
@@ -32,6 +45,12 @@ export const openCaseSchema = z
       if (!form.csv.trim()) refuse('csv', 'Paste the table of parts, or choose a file.');
       if (!form.reference.trim())
         refuse('reference', 'Name the node that readings are taken against.');
+      const design = readQuantity(form.designVolts, 'V');
+      if (!design.ok) refuse('designVolts', design.message);
+      const hertz = readQuantity(form.hertz, 'Hz');
+      if (!hertz.ok) refuse('hertz', hertz.message);
+      if (form.hot.trim() && !form.return.trim())
+        refuse('return', 'Name the node that the line returns to.');
     }
     const volts = readQuantity(form.lineVolts, 'V');
     if (!volts.ok) refuse('lineVolts', volts.message);
@@ -71,8 +90,21 @@ async function circuitOf(form: OpenCaseForm): Promise<{ familyId?: number; netli
     csv: form.csv,
     title: form.set,
     reference: form.reference.trim(),
+    line: lineOf(form),
   });
   return { netlist: data.netlist };
+}
+
+function lineOf(form: OpenCaseForm): Line | undefined {
+  const volts = readQuantity(form.designVolts, 'V');
+  const hertz = readQuantity(form.hertz, 'Hz');
+  if (!form.hot.trim() || !volts.ok || !volts.value || !hertz.ok || !hertz.value) return undefined;
+  return {
+    hot: form.hot.trim(),
+    return: form.return.trim(),
+    volts: volts.value,
+    hertz: hertz.value,
+  };
 }
 
 /** Opens a case; a pasted table of parts is turned into a circuit first. */

@@ -1,4 +1,5 @@
 import { Checkbox, Field, makeStyles, SearchBox, Select, tokens } from '@fluentui/react-components';
+import { OPEN_STATES, stateInWords } from '@/lib/words';
 import { type CaseFilter } from '../api/get-cases';
 
 const useStyles = makeStyles({
@@ -39,6 +40,11 @@ export function CaseFilters({ filter, onChange }: CaseFiltersProps) {
           onChange={(event, { value }) => onChange(event, { ...filter, state: value })}
         >
           <option value="open">Open cases</option>
+          {OPEN_STATES.map((state) => (
+            <option key={state} value={state}>
+              {stateInWords(state).word}
+            </option>
+          ))}
           <option value="closed">Closed cases</option>
           <option value="all">All cases</option>
         </Select>

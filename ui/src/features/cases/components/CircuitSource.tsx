@@ -7,6 +7,11 @@ import { type OpenCaseForm } from '../api/open-case';
 
 const useStyles = makeStyles({
   root: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalM },
+  line: {
+    display: 'grid',
+    gridTemplateColumns: 'repeat(auto-fit, minmax(min(100%, 220px), 1fr))',
+    gap: tokens.spacingHorizontalM,
+  },
 });
 
 interface CircuitSourceProps {
@@ -98,6 +103,17 @@ export function CircuitSource({ control, families, familiesMessage, onFile }: Ci
             hint="Readings are taken against this node unless they say otherwise."
             isRequired
           />
+          <div className={styles.line}>
+            <TextField
+              control={control}
+              name="hot"
+              label="Line, hot node"
+              hint="Leave it empty for a circuit without power."
+            />
+            <TextField control={control} name="return" label="Line, return node" />
+            <TextField control={control} name="designVolts" label="Design voltage" />
+            <TextField control={control} name="hertz" label="Frequency" />
+          </div>
         </>
       )}
     </div>

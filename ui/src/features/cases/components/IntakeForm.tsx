@@ -1,7 +1,7 @@
-import { Button, makeStyles, Text, tokens } from '@fluentui/react-components';
+import { Button, Field, makeStyles, Select, Text, tokens } from '@fluentui/react-components';
 import { zodResolver } from '@hookform/resolvers/zod';
-import { useForm } from 'react-hook-form';
-import { z } from 'zod';
+import { useController, useForm } from 'react-hook-form';
+import * as z from 'zod/mini';
 import { formatQuantity } from '@engine/units';
 import { FormMessage } from '@/components/FormMessage';
 import { readQuantity } from '@/components/QuantityInput';
@@ -9,15 +9,24 @@ import { TextField } from '@/components/TextField';
 import { type Case } from '@/lib/api-model';
 import { hasStatus } from '@/lib/api-problem';
 import { showProblem } from '@/lib/form-problems';
+import { OPEN_STATES, stateInWords } from '@/lib/words';
 import { useUpdateCase } from '../api/update-case';
 
 const intakeSchema = z.object({
-  set: z.string().trim().min(1, 'Say which set it is.').max(200),
-  complaint: z.string().trim().min(1, 'Say what is wrong with it, in a sentence.').max(2000),
-  earlierWork: z.string().trim().max(4000),
-  lineVolts: z.string().superRefine((text, context) => {
-    const read = readQuantity(text, 'V');
-    if (!read.ok) context.addIssue({ code: 'custom', message: read.message });
+  set: z.string().check(z.trim(), z.minLength(1, 'Say which set it is.'), z.maxLength(200)),
+  complaint: z
+    .string()
+    .check(
+      z.trim(),
+      z.minLength(1, 'Say what is wrong with it, in a sentence.'),
+      z.maxLength(2000),
+    ),
+  earlierWork: z.string().check(z.trim(), z.maxLength(4000)),
+  state: z.string(),
+  lineVolts: z.string().check((context) => {
+    const read = readQuantity(context.value, 'V');
+    if (!read.ok)
+      context.issues.push({ code: 'custom', message: read.message, input: context.value });
   }),
 });
 type IntakeInput = z.infer<typeof intakeSchema>;
@@ -48,19 +57,24 @@ export function IntakeForm({ repair, onRefetch }: IntakeFormProps) {
       set: repair.set,
       complaint: repair.complaint,
       earlierWork: repair.earlierWork ?? '',
+      state: repair.state,
       lineVolts: repair.lineVolts ? formatQuantity(repair.lineVolts, 'V', 4) : '',
     },
     // An answer that arrives while somebody types must not take their words away.
     resetOptions: { keepDirtyValues: true },
   });
+  const {
+    field: { value: state, onChange: chooseState },
+  } = useController({ control, name: 'state' });
   const send = handleSubmit((input) => {
     const volts = readQuantity(input.lineVolts, 'V');
     const lineVolts = volts.ok ? (volts.value ?? null) : undefined;
-    return update.mutateAsync({ ...input, lineVolts, version: repair.version }).then(
+    const change = { ...input, lineVolts, version: repair.version };
+    return update.mutateAsync(change).then(
       () => reset(input),
       (error: unknown) => {
         if (hasStatus(error, 409)) onRefetch();
-        showProblem(error, setError, ['set', 'complaint', 'earlierWork', 'lineVolts']);
+        showProblem(error, setError, ['set', 'complaint', 'earlierWork', 'state', 'lineVolts']);
       },
     );
   });
@@ -88,6 +102,17 @@ export function IntakeForm({ repair, onRefetch }: IntakeFormProps) {
         label="Line voltage today"
         hint="Measured at the outlet or behind the isolation transformer."
       />
+      {repair.abilities.edit && (
+        <Field label="State" hint="What the set waits for; closing it is a step of its own.">
+          <Select size="large" value={state} onChange={(_event, { value }) => chooseState(value)}>
+            {OPEN_STATES.map((one) => (
+              <option key={one} value={one}>
+                {stateInWords(one).word}
+              </option>
+            ))}
+          </Select>
+        </Field>
+      )}
       {repair.abilities.edit && (
         <div className={styles.actions}>
           <Button type="submit" appearance="primary" size="large" disabled={update.isPending}>

@@ -44,7 +44,11 @@ export function OpenCaseDialog(props: OpenCaseDialogProps) {
       familyId: '',
       netlistText: '',
       csv: '',
-      reference: 'chassis',
+      reference: 'CHASSIS',
+      hot: '',
+      return: '',
+      designVolts: '117',
+      hertz: '60',
       lineVolts: '',
     },
   });
@@ -57,6 +61,8 @@ export function OpenCaseDialog(props: OpenCaseDialogProps) {
         {
           netlist: form.source === 'csv' ? 'csv' : 'netlistText',
           parts: form.source === 'csv' ? 'csv' : 'netlistText',
+          line: form.source === 'csv' ? 'hot' : 'netlistText',
+          title: 'set',
         },
       );
     }),

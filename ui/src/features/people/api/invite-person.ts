@@ -1,15 +1,17 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { z } from 'zod';
+import * as z from 'zod/mini';
 import { apiClient } from '@/lib/api-client';
 import { type Person, ROLES } from '@/lib/api-model';
 
 /** What inviting somebody takes. */
 export const invitePersonSchema = z.object({
-  name: z.string().trim().min(1, 'Type the person’s name.').max(120),
+  name: z.string().check(z.trim(), z.minLength(1, 'Type the person’s name.'), z.maxLength(120)),
   email: z
     .string()
-    .trim()
-    .regex(/^[^\s@]+@[^\s@]+$/, 'Type an e-mail address, such as kim@shop.example.'),
+    .check(
+      z.trim(),
+      z.regex(/^[^\s@]+@[^\s@]+$/, 'Type an e-mail address, such as kim@shop.example.'),
+    ),
   role: z.enum(ROLES),
 });
 export type InvitePersonInput = z.infer<typeof invitePersonSchema>;
