@@ -94,6 +94,8 @@ export function ReadingCell(props: ReadingCellProps) {
     if (event.key === 'Escape') {
       if (entry.draft !== undefined || entry.error) event.stopPropagation();
       props.onRevert();
+      const field = event.currentTarget;
+      requestAnimationFrame(() => field.select());
     } else if (move) {
       event.preventDefault();
       if (props.onEnter() || event.key !== 'Enter') onMove(move);
@@ -134,7 +136,7 @@ export function ReadingCell(props: ReadingCellProps) {
           event.target.select();
           props.onFocus();
         }}
-        onBlur={() => props.onEnter()}
+        onBlur={() => entry.draft !== undefined && props.onEnter()}
       />
       {entry.error && (
         <p id={errorId} role="alert" className={styles.error}>

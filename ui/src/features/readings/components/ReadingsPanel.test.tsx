@@ -132,6 +132,22 @@ describe('ReadingsPanel', () => {
     );
   });
 
+  it('sends a refused reading again on Enter and drops it on Escape', async () => {
+    client.post.mockRejectedValueOnce({
+      response: { status: 409, data: { title: 'Not yet', detail: 'Read the cautions first.' } },
+    });
+    renderPanel(panel());
+    await userEvent.type(await cell('ohms across R1A'), '22{Enter}');
+    await waitFor(async () =>
+      expect(await cell('ohms across R1A')).toHaveAccessibleDescription('Read the cautions first.'),
+    );
+    await userEvent.click(await cell('ohms across R1A'));
+    await userEvent.keyboard('{Enter}');
+    await waitFor(() => expect(sent()).toHaveLength(2));
+    await waitFor(async () => expect(await cell('ohms across R1A')).toBeValid());
+    expect(usePendingReadings.getState().pending).toEqual({});
+  });
+
   it('takes the last change back', async () => {
     renderPanel(panel());
     await userEvent.type(await cell('ohms at Dropper lug 1'), '60{Enter}');

@@ -100,11 +100,12 @@ export function useReadingEntry(
   const change = useCallback(
     (place: Place, next: Change['before']) => {
       const before = currentAt(placeKey(place));
-      if (before?.value === next?.value && before?.seen === next?.seen) return;
+      const isRefused = !!waiting.get(placeKey(place))?.refusal;
+      if (!isRefused && before?.value === next?.value && before?.seen === next?.seen) return;
       setChanges((old) => [...old.slice(-49), { place, before }]);
       put(place, next);
     },
-    [currentAt, put],
+    [currentAt, put, waiting],
   );
 
   return {
@@ -127,7 +128,12 @@ export function useReadingEntry(
     enter: (place, given) => {
       const key = placeKey(place);
       const text = given ?? usePendingReadings.getState().drafts[caseId]?.[key];
-      if (text === undefined) return true;
+      if (text === undefined) {
+        // Enter on a value that the service refused sends it once more.
+        const one = waiting.get(key);
+        if (one?.refusal) put(place, one.withdraws ? null : one);
+        return true;
+      }
       if (text.trim() === '') {
         change(place, null);
       } else {
@@ -145,8 +151,11 @@ export function useReadingEntry(
     },
     see: (place, seen) => change(place, seen ? { seen } : null),
     revert: (place) => {
-      setDraft(caseId, placeKey(place), undefined);
-      setError(placeKey(place));
+      const key = placeKey(place);
+      const one = waiting.get(key);
+      if (one?.refusal) settle(caseId, [one.clientId]);
+      setDraft(caseId, key, undefined);
+      setError(key);
     },
     undo: () => {
       const last = changes[changes.length - 1];

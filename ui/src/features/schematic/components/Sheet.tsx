@@ -75,6 +75,12 @@ export function Sheet(props: SheetProps) {
     [flow],
   );
 
+  // So does one that was chosen elsewhere, in the list of suspects say.
+  useEffect(() => {
+    const chosen = drawing.parts.find(({ part }) => part.ref === selected);
+    if (chosen) reveal(boxOfPart(chosen));
+  }, [drawing, selected, reveal]);
+
   const nodes = useMemo<Node<PartNodeData | SheetNodeData>[]>(
     () => [
       {

@@ -1,6 +1,7 @@
 import { type Netlist } from '@engine/netlist/types';
 import { type Box, type Drawing } from './drawing';
 import { layoutNetlist } from './layout-netlist';
+import { findOverlaps } from './overlaps';
 import { isPlaced, layoutAsPlaced } from './placed-layout';
 
 /** Below this scale the text of a drawing is too small to read. */
@@ -13,7 +14,8 @@ const WIDTHS = [360, 520, 700, 900, 1150, 1450, 1800];
  *
  * @param netlist checked circuit; a layout made by hand wins.
  * @param room px on the screen.
- * @returns the drawing, or null when the circuit needs the general layout.
+ * @returns the drawing, free of overlaps unless placed by hand; null when the circuit needs the general
+ *   layout.
  */
 export function bestDrawing(
   netlist: Netlist,
@@ -33,8 +35,9 @@ export function bestDrawing(
     if (extent.width < width * 0.7) break;
   }
   // Too long to be read whole: fill the width, and the rest is a matter of panning.
-  if (best && best.scale < LEGIBLE) return widest?.drawing ?? best.drawing;
-  return best?.drawing ?? null;
+  const chosen = best && best.scale < LEGIBLE ? widest : best;
+  // Labels that collide are the sign of a form that was not foreseen.
+  return chosen && findOverlaps(chosen.drawing).length === 0 ? chosen.drawing : null;
 }
 
 /** Where a drawing stands on the screen: px of its origin, and its scale. */

@@ -5,7 +5,6 @@ import { drawString, drawSupply, type Figure } from './draw-lane';
 import { boundsOf, finish } from './finish';
 import { type Lane, laneOf } from './lane';
 import { CLEARANCE } from './metrics';
-import { findOverlaps } from './overlaps';
 import { moved } from './place-sketch';
 
 const FIGURE_GAP = 3 * CLEARANCE;
@@ -15,7 +14,7 @@ const FIGURE_GAP = 3 * CLEARANCE;
  *
  * @param netlist checked circuit.
  * @param width room for a string's rows, px.
- * @returns the drawing, or null when a figure is neither a string nor a supply, or labels would collide.
+ * @returns the drawing, or null when a figure is neither a string nor a supply.
  */
 export function layoutNetlist(netlist: Netlist, width: number): Drawing | null {
   if (netlist.parts.length === 0) return finish(emptySketch());
@@ -33,8 +32,7 @@ export function layoutNetlist(netlist: Netlist, width: number): Drawing | null {
     );
   }
   const sketch = onShelves(figures, width);
-  const drawing = finish(sketch);
-  return findOverlaps(drawing).length === 0 ? drawing : null;
+  return finish(sketch);
 }
 
 /** Puts figures side by side as long as they fit, their lines on one level; the next ones go below. */
