@@ -11,6 +11,7 @@ import {
   wholeReceiver,
 } from '@/testing/fixtures/circuits';
 import { describe, expect, it } from 'vitest';
+import { bestDrawing } from './best-drawing';
 import { type Drawing } from './drawing';
 import { layoutNetlist } from './layout-netlist';
 import { findOverlaps } from './overlaps';
@@ -182,7 +183,7 @@ describe('a supply', () => {
 
 describe('other circuits', () => {
   it('leaves a crosswise graph to the general layout', () => {
-    expect(layoutNetlist(crossedBridge, 1000)).toBeNull();
+    expect(bestDrawing(crossedBridge, { width: 1000, height: 600 })).toBeNull();
   });
 
   it('draws an empty circuit as an empty sheet', () => {
