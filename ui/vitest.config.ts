@@ -1,9 +1,8 @@
 import react from '@vitejs/plugin-react';
 import { configDefaults, defineConfig } from 'vitest/config';
-import { alias } from './vite.config';
+import { alias } from './vite.config.ts';
 
 // Vitest reads its settings from a default export only.
-// eslint-disable-next-line no-restricted-syntax
 export default defineConfig({
   plugins: [react()],
   resolve: { alias },

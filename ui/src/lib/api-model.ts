@@ -95,16 +95,16 @@ export interface Family extends FamilySummary {
 }
 
 export interface RuleSummary {
-  id: string | number;
+  /** The rule's own id, a word. */
+  id: string;
   pack: string;
   name: string;
   sentence: string;
-  effect: string;
+  effects: string[];
   because: string;
-  source?: string | null;
+  source?: { title: string; status: string };
   version: number;
   state: string;
-  isRefused?: boolean;
 }
 
 export interface RuleList {
@@ -113,15 +113,17 @@ export interface RuleList {
 }
 
 export interface PartFact {
-  id?: string | number;
   type: string;
+  volts: number;
+  amps: number;
   source: string;
+  /** "confirmed" for the fields it names, else "from memory". */
   status: string;
-  volts?: number;
-  amps?: number;
-  warmUp?: string | number | null;
-  note?: string | null;
-  [fact: string]: unknown;
+  /** What a tube does. */
+  role?: string;
+  base?: string;
+  beadColour?: string;
+  note?: string;
 }
 
 export interface Page<Item> {

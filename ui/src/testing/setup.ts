@@ -29,6 +29,7 @@ window.matchMedia ??= (query: string) =>
   }) as MediaQueryList;
 
 Element.prototype.scrollIntoView ??= () => {};
+window.scrollTo = () => {};
 
 Object.defineProperties(HTMLElement.prototype, {
   offsetHeight: { configurable: true, get: () => 600 },

@@ -17,7 +17,7 @@ export function PartsTable({ caption, items }: PartsTableProps) {
         <caption className={table.caption}>{caption}</caption>
         <thead>
           <tr>
-            {['Type', 'Volts', 'Current', 'Source', 'Status'].map((title) => (
+            {['Type', 'Volts', 'Current', 'What it is', 'Source', 'Status'].map((title) => (
               <th key={title} scope="col" className={table.head}>
                 {title}
               </th>
@@ -30,11 +30,12 @@ export function PartsTable({ caption, items }: PartsTableProps) {
               <th scope="row" className={table.cell}>
                 {item.type}
               </th>
+              <td className={table.cell}>{formatQuantity(item.volts, 'V', 3)}</td>
+              <td className={table.cell}>{formatQuantity(item.amps, 'A', 3)}</td>
               <td className={table.cell}>
-                {item.volts === undefined ? 'Not known' : formatQuantity(item.volts, 'V', 3)}
-              </td>
-              <td className={table.cell}>
-                {item.amps === undefined ? 'Not known' : formatQuantity(item.amps, 'A', 3)}
+                {[item.role, item.base, item.beadColour && `${item.beadColour} bead`, item.note]
+                  .filter(Boolean)
+                  .join(', ')}
               </td>
               <td className={table.cell}>{item.source}</td>
               <td className={table.cell}>

@@ -19,6 +19,7 @@ const useStyles = makeStyles({
     alignItems: 'center',
     gap: tokens.spacingHorizontalM,
   },
+  effects: { display: 'flex', flexWrap: 'wrap', gap: tokens.spacingHorizontalXS },
   name: { margin: 0, fontSize: tokens.fontSizeBase400, lineHeight: tokens.lineHeightBase400 },
   sentence: { maxWidth: '68ch' },
   quiet: { color: tokens.colorNeutralForeground3, maxWidth: '68ch' },
@@ -31,17 +32,24 @@ export function RuleCard({ rule }: { rule: RuleSummary }) {
     <li className={styles.card}>
       <div className={styles.top}>
         <h3 className={styles.name}>{rule.name}</h3>
-        <StatusBadge tone={rule.effect === 'caution' ? 'warn' : 'calm'}>
-          {rule.effect.replaceAll('-', ' ')}
-        </StatusBadge>
+        <span className={styles.effects}>
+          {rule.effects.map((effect) => (
+            <StatusBadge key={effect} tone={effect === 'caution' ? 'warn' : 'calm'}>
+              {effect.replaceAll('-', ' ')}
+            </StatusBadge>
+          ))}
+        </span>
       </div>
       <Text className={styles.sentence}>{rule.sentence}</Text>
       <Text className={styles.sentence}>
         <strong>Because:</strong> {rule.because}
       </Text>
       <Text size={200} className={styles.quiet}>
-        {rule.source ? `Source: ${rule.source}` : 'No source is given.'} Version {rule.version}
-        {rule.state === 'published' ? '.' : `, ${rule.state}.`}
+        {rule.source
+          ? `Source: ${rule.source.title} (${rule.source.status}).`
+          : 'No source is given.'}{' '}
+        Version {rule.version}
+        {rule.state === 'active' ? '.' : `, ${rule.state}.`}
       </Text>
     </li>
   );
