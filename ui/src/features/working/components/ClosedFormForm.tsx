@@ -112,7 +112,7 @@ export function ClosedFormForm({ caseId, netlist, readings, part }: ClosedFormFo
               : `${answer.part} would have to be ${formatQuantity(answer.impliedValue, 'Ω')}.`}
           </Text>
           {marked && partValue(marked) && <Text block>It is marked {partValue(marked)}.</Text>}
-          <MathLine text={answer.text} />
+          <MathLine text={answer.text} mathml={answer.mathml} />
           {answer.note && <Text block>{answer.note}</Text>}
         </div>
       )}

@@ -88,8 +88,13 @@ export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: W
           </Text>
         ) : (
           <dl className={styles.equations}>
-            {working.equations.map(({ node, text }, index) => (
-              <Equation key={`${node} ${index}`} node={labelForNode(netlist, node)} text={text} />
+            {working.equations.map(({ node, text, mathml }, index) => (
+              <Equation
+                key={`${node} ${index}`}
+                node={labelForNode(netlist, node)}
+                text={text}
+                mathml={mathml}
+              />
             ))}
           </dl>
         )}
@@ -128,13 +133,13 @@ export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: W
   );
 }
 
-function Equation({ node, text }: { node: string; text: string }) {
+function Equation({ node, text, mathml }: { node: string; text: string; mathml?: string }) {
   const styles = useStyles();
   return (
     <>
       <dt className={styles.node}>{node}</dt>
       <dd className={styles.equation}>
-        <MathLine text={text} />
+        <MathLine text={text} mathml={mathml} />
       </dd>
     </>
   );
