@@ -49,7 +49,9 @@ export function setUp(app: NestExpressApplication): NestExpressApplication {
 export function describeApi(app: NestExpressApplication): OpenAPIObject {
   const config = new DocumentBuilder()
     .setTitle('Ohmstead')
-    .setDescription('Cases, readings and diagnoses of tube-era sets. Errors are application/problem+json (RFC 9457).')
+    .setDescription(
+      'Cases, readings and diagnoses of tube-era sets. Errors are application/problem+json (RFC 9457).',
+    )
     .setVersion('1')
     .addBearerAuth()
     .build();

@@ -37,7 +37,9 @@ async function start(): Promise<void> {
 start().catch((error: unknown) => {
   if (error instanceof SettingsError) console.error(error.message);
   else if ((error as { code?: string }).code === 'EADDRINUSE') {
-    console.error('The port is taken. Stop the other program, or choose another port: PORT=3001 npm start');
+    console.error(
+      'The port is taken. Stop the other program, or choose another port: PORT=3001 npm start',
+    );
   } else console.error(error);
   process.exit(1);
 });

@@ -8,7 +8,13 @@ import { Public } from '../common/decorators/public.decorator';
 import { PersonDto, presentPerson } from '../people/dto/person.dto';
 import { Person } from '../people/person.model';
 import { AuthService, REFRESH_DAYS, type Session } from './auth.service';
-import { AcceptInvitationDto, SetupDto, SetupNeededDto, SignedInDto, SignInDto } from './dto/auth.dto';
+import {
+  AcceptInvitationDto,
+  SetupDto,
+  SetupNeededDto,
+  SignedInDto,
+  SignInDto,
+} from './dto/auth.dto';
 
 export const REFRESH_COOKIE = 'ohmstead_refresh';
 const COOKIE_PATH = '/api/auth';
@@ -26,7 +32,10 @@ export class AuthController {
   @HttpCode(200)
   @ApiOkResponse({ type: SignedInDto })
   @ApiProblems(400, 401, 403, 429)
-  async signIn(@Body() body: SignInDto, @Res({ passthrough: true }) response: Response): Promise<SignedInDto> {
+  async signIn(
+    @Body() body: SignInDto,
+    @Res({ passthrough: true }) response: Response,
+  ): Promise<SignedInDto> {
     return keep(await this.auth.signIn(body), response);
   }
 
@@ -35,7 +44,10 @@ export class AuthController {
   @HttpCode(200)
   @ApiOkResponse({ type: SignedInDto })
   @ApiProblems(401)
-  async refresh(@Req() request: Request, @Res({ passthrough: true }) response: Response): Promise<SignedInDto> {
+  async refresh(
+    @Req() request: Request,
+    @Res({ passthrough: true }) response: Response,
+  ): Promise<SignedInDto> {
     return keep(await this.auth.refresh(cookieOf(request)), response);
   }
 
@@ -43,7 +55,10 @@ export class AuthController {
   @Post('sign-out')
   @HttpCode(204)
   @ApiNoContentResponse()
-  async signOut(@Req() request: Request, @Res({ passthrough: true }) response: Response): Promise<void> {
+  async signOut(
+    @Req() request: Request,
+    @Res({ passthrough: true }) response: Response,
+  ): Promise<void> {
     await this.auth.signOut(cookieOf(request));
     response.clearCookie(REFRESH_COOKIE, { path: COOKIE_PATH });
   }
@@ -82,7 +97,10 @@ export class AuthController {
   @HttpCode(200)
   @ApiOkResponse({ type: SignedInDto })
   @ApiProblems(400, 409)
-  async setUp(@Body() body: SetupDto, @Res({ passthrough: true }) response: Response): Promise<SignedInDto> {
+  async setUp(
+    @Body() body: SetupDto,
+    @Res({ passthrough: true }) response: Response,
+  ): Promise<SignedInDto> {
     return keep(await this.auth.setUp(body), response);
   }
 }

@@ -44,10 +44,18 @@ export class AuthService {
     const person = await this.people.findOne({ where: { email: email.trim().toLowerCase() } });
     const isRight = await bcrypt.compare(password, person?.passwordHash ?? NOBODY);
     if (!person?.passwordHash || !isRight) {
-      throw new ProblemException(401, 'wrong-sign-in', 'E-mail or password is not right. Check both and try again.');
+      throw new ProblemException(
+        401,
+        'wrong-sign-in',
+        'E-mail or password is not right. Check both and try again.',
+      );
     }
     if (person.isBlocked) {
-      throw new ProblemException(403, 'blocked', 'This account is blocked. Ask the owner of the shop.');
+      throw new ProblemException(
+        403,
+        'blocked',
+        'This account is blocked. Ask the owner of the shop.',
+      );
     }
     return this.database.write((transaction) => this.open(person, randomUUID(), transaction));
   }
@@ -63,7 +71,10 @@ export class AuthService {
       const known = await this.tokens.findOne({ where: { tokenHash: digest(token) }, transaction });
       if (!known || known.revokedAt || known.expiresAt.getTime() < Date.now()) return null;
       if (known.replacedAt && Date.now() - known.replacedAt.getTime() > GRACE_MS) {
-        await this.tokens.update({ revokedAt: new Date() }, { where: { chain: known.chain }, transaction });
+        await this.tokens.update(
+          { revokedAt: new Date() },
+          { where: { chain: known.chain }, transaction },
+        );
         return null;
       }
       const person = await this.people.findByPk(known.personId, { transaction });
@@ -81,7 +92,10 @@ export class AuthService {
     await this.database.write(async (transaction) => {
       const known = await this.tokens.findOne({ where: { tokenHash: digest(token) }, transaction });
       if (!known) return;
-      await this.tokens.update({ revokedAt: new Date() }, { where: { chain: known.chain }, transaction });
+      await this.tokens.update(
+        { revokedAt: new Date() },
+        { where: { chain: known.chain }, transaction },
+      );
     });
   }
 
@@ -89,10 +103,18 @@ export class AuthService {
   async acceptInvitation({ token, name, password }: AcceptInvitationDto): Promise<Session> {
     const passwordHash = await bcrypt.hash(password, ROUNDS);
     return this.database.write(async (transaction) => {
-      const person = await this.people.findOne({ where: { invitationHash: digest(token) }, transaction });
-      const isOpen = person?.invitationExpiresAt && person.invitationExpiresAt.getTime() > Date.now();
+      const person = await this.people.findOne({
+        where: { invitationHash: digest(token) },
+        transaction,
+      });
+      const isOpen =
+        person?.invitationExpiresAt && person.invitationExpiresAt.getTime() > Date.now();
       if (!person || !isOpen || person.isBlocked) {
-        throw new ProblemException(410, 'invitation-over', 'This invitation has been used or has expired. Ask the owner for a new one.');
+        throw new ProblemException(
+          410,
+          'invitation-over',
+          'This invitation has been used or has expired. Ask the owner for a new one.',
+        );
       }
       await person.update(
         { name: name.trim(), passwordHash, invitationHash: null, invitationExpiresAt: null },
@@ -112,7 +134,10 @@ export class AuthService {
     const passwordHash = await bcrypt.hash(password, ROUNDS);
     return this.database.write(async (transaction) => {
       if ((await this.people.count({ transaction })) > 0) {
-        throw conflict('set-up-already', 'The shop has an owner already. Sign in, or ask for an invitation.');
+        throw conflict(
+          'set-up-already',
+          'The shop has an owner already. Sign in, or ask for an invitation.',
+        );
       }
       await this.shops.create({ name: shopName.trim() }, { transaction });
       const person = await this.people.create(
@@ -134,7 +159,13 @@ export class AuthService {
       },
       { transaction },
     );
-    const accessToken = await this.jwt.signAsync({}, { subject: String(person.id), expiresIn: ACCESS_SECONDS });
-    return { answer: { accessToken, expiresIn: ACCESS_SECONDS, person: presentPerson(person) }, refreshToken };
+    const accessToken = await this.jwt.signAsync(
+      {},
+      { subject: String(person.id), expiresIn: ACCESS_SECONDS },
+    );
+    return {
+      answer: { accessToken, expiresIn: ACCESS_SECONDS, person: presentPerson(person) },
+      refreshToken,
+    };
   }
 }

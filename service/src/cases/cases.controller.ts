@@ -1,5 +1,21 @@
-import { Body, Controller, Get, HttpCode, Param, ParseIntPipe, Patch, Post, Query } from '@nestjs/common';
-import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiQuery, ApiTags } from '@nestjs/swagger';
+import {
+  Body,
+  Controller,
+  Get,
+  HttpCode,
+  Param,
+  ParseIntPipe,
+  Patch,
+  Post,
+  Query,
+} from '@nestjs/common';
+import {
+  ApiBearerAuth,
+  ApiCreatedResponse,
+  ApiOkResponse,
+  ApiQuery,
+  ApiTags,
+} from '@nestjs/swagger';
 import { ApiProblems } from '../common/decorators/api-problems.decorator';
 import { CurrentPerson } from '../common/decorators/current-person.decorator';
 import { Person } from '../people/person.model';
@@ -27,7 +43,11 @@ export class CasesController {
     @Query('mine') mine?: string,
   ): Promise<CaseSummaryDto[]> {
     const isMine = mine === '1' || mine === 'true';
-    return this.cases.list(actor, { state: state && String(state), search: search && String(search), isMine });
+    return this.cases.list(actor, {
+      state: state && String(state),
+      search: search && String(search),
+      isMine,
+    });
   }
 
   @Post()
@@ -59,7 +79,10 @@ export class CasesController {
   @HttpCode(200)
   @ApiOkResponse({ type: CaseDto })
   @ApiProblems(401, 404)
-  acknowledge(@CurrentPerson() actor: Person, @Param('id', ParseIntPipe) id: number): Promise<CaseDto> {
+  acknowledge(
+    @CurrentPerson() actor: Person,
+    @Param('id', ParseIntPipe) id: number,
+  ): Promise<CaseDto> {
     return this.cases.acknowledgeCautions(actor, id);
   }
 

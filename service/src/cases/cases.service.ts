@@ -14,7 +14,12 @@ import { canCloseCase, canEditCase, canOpenCase, canReadCases, canReopenCase } f
 import { CautionAcknowledgement } from './caution-acknowledgement.model';
 import { ConfirmedFault } from './confirmed-fault.model';
 import { type CaseDto, type CaseSummaryDto, presentCase, presentSummary } from './dto/case.dto';
-import type { ChangeCaseDto, CloseCaseDto, ConfirmFaultDto, OpenCaseDto } from './dto/change-case.dto';
+import type {
+  ChangeCaseDto,
+  CloseCaseDto,
+  ConfirmFaultDto,
+  OpenCaseDto,
+} from './dto/change-case.dto';
 
 const WITH_PEOPLE = [
   Family,
@@ -48,8 +53,14 @@ export class CasesService {
     const where: WhereOptions = {};
     if (state === 'open' || !state) Object.assign(where, { state: { [Op.ne]: 'closed' } });
     else if (state !== 'all') Object.assign(where, { state });
-    if (isMine) Object.assign(where, { [Op.or]: [{ assignedToId: actor.id }, { openedById: actor.id }] });
-    const found = await this.cases.findAll({ where, include: WITH_PEOPLE, order: [['updatedAt', 'DESC']], limit: 500 });
+    if (isMine)
+      Object.assign(where, { [Op.or]: [{ assignedToId: actor.id }, { openedById: actor.id }] });
+    const found = await this.cases.findAll({
+      where,
+      include: WITH_PEOPLE,
+      order: [['updatedAt', 'DESC']],
+      limit: 500,
+    });
     const words = (search ?? '').toLowerCase().split(/\s+/).filter(Boolean);
     const kept = found.filter(({ number, setName, complaint, family }) => {
       const text = [number, setName, complaint, family?.name ?? ''].join(' ').toLowerCase();
@@ -119,7 +130,10 @@ export class CasesService {
         { where: { id, version: body.version }, transaction },
       );
       if (count === 0) {
-        throw conflict('stale-version', 'Somebody changed this case meanwhile. Reload it; what you typed is still here.');
+        throw conflict(
+          'stale-version',
+          'Somebody changed this case meanwhile. Reload it; what you typed is still here.',
+        );
       }
     });
     return this.get(actor, id);
@@ -136,11 +150,18 @@ export class CasesService {
   }
 
   /** Closes a case; its confirmed faults join the family's experience. */
-  async close(actor: Person, id: number, { outcome, confirmedFaults, note }: CloseCaseDto): Promise<CaseDto> {
+  async close(
+    actor: Person,
+    id: number,
+    { outcome, confirmedFaults, note }: CloseCaseDto,
+  ): Promise<CaseDto> {
     const found = await this.find(id);
     allow(canCloseCase(actor, found), 'A technician closes cases. Ask one to look at yours.');
     if (outcome === 'repaired' && confirmedFaults.length === 0) {
-      throw badField('/confirmedFaults', 'Name the part that was bad, or close the case as “no fault found”.');
+      throw badField(
+        '/confirmedFaults',
+        'Name the part that was bad, or close the case as “no fault found”.',
+      );
     }
     if (outcome === 'not-repaired' && !note?.trim()) {
       throw badField('/note', 'Say why the set was not repaired.');
@@ -174,7 +195,13 @@ export class CasesService {
     await this.database.write(async (transaction) => {
       await this.faults.destroy({ where: { caseId: id }, transaction });
       await found.update(
-        { state: 'on-the-bench', outcome: null, closedAt: null, closedById: null, version: found.version + 1 },
+        {
+          state: 'on-the-bench',
+          outcome: null,
+          closedAt: null,
+          closedById: null,
+          version: found.version + 1,
+        },
         { transaction },
       );
     });
@@ -195,7 +222,12 @@ export class CasesService {
 
   private async present(actor: Person, found: Case): Promise<CaseDto> {
     const counts = await this.countReadings([found.id]);
-    return presentCase(found, actor, counts.get(found.id) ?? 0, await this.hasAcknowledged(found.id, actor.id));
+    return presentCase(
+      found,
+      actor,
+      counts.get(found.id) ?? 0,
+      await this.hasAcknowledged(found.id, actor.id),
+    );
   }
 
   private async countReadings(ids: number[]): Promise<Map<number, number>> {
@@ -207,7 +239,8 @@ export class CasesService {
   }
 
   private async circuitFor({ familyId, netlist }: OpenCaseDto) {
-    if (netlist !== undefined) return { netlist: soundNetlist(netlist), familyId: null, familyVersion: null };
+    if (netlist !== undefined)
+      return { netlist: soundNetlist(netlist), familyId: null, familyVersion: null };
     if (familyId === undefined) {
       throw badField('/familyId', 'Choose a chassis family, or bring a netlist.');
     }
@@ -231,9 +264,12 @@ export class CasesService {
 
 function checkFault(netlist: Netlist, { part, mode }: ConfirmFaultDto, i: number): void {
   const found = netlist.parts.find(({ ref }) => ref === part);
-  if (!found) throw badField(`/confirmedFaults/${i}/part`, `There is no part ${part} in this circuit.`);
+  if (!found)
+    throw badField(`/confirmedFaults/${i}/part`, `There is no part ${part} in this circuit.`);
   if (!modesOf(found).includes(mode)) {
-    throw badField(`/confirmedFaults/${i}/mode`, `A ${found.kind} such as ${part} cannot fail in this way.`);
+    throw badField(
+      `/confirmedFaults/${i}/mode`,
+      `A ${found.kind} such as ${part} cannot fail in this way.`,
+    );
   }
 }
-

@@ -4,7 +4,14 @@ import { ApiProblems } from '../common/decorators/api-problems.decorator';
 import { CurrentPerson } from '../common/decorators/current-person.decorator';
 import { Person } from '../people/person.model';
 import { CircuitsService } from './circuits.service';
-import { CheckCircuitDto, CheckedCircuitDto, ImportCsvDto, ImportedCircuitDto, SolveCircuitDto, SolvedCircuitDto } from './dto/circuits.dto';
+import {
+  CheckCircuitDto,
+  CheckedCircuitDto,
+  ImportCsvDto,
+  ImportedCircuitDto,
+  SolveCircuitDto,
+  SolvedCircuitDto,
+} from './dto/circuits.dto';
 
 @ApiTags('circuits')
 @ApiBearerAuth()

@@ -1,9 +1,22 @@
 import { Injectable } from '@nestjs/common';
 import { DiagnosisPool } from '../diagnosis/diagnosis-pool';
-import { type AsFound, checkNetlist, EngineError, importCsv, type Netlist, readNetlist } from '../engine';
+import {
+  type AsFound,
+  checkNetlist,
+  EngineError,
+  importCsv,
+  type Netlist,
+  readNetlist,
+} from '../engine';
 import { allow, isAtLeast } from '../common/policy';
 import type { Person } from '../people/person.model';
-import type { CheckedCircuitDto, ImportCsvDto, ImportedCircuitDto, SolveCircuitDto, SolvedCircuitDto } from './dto/circuits.dto';
+import type {
+  CheckedCircuitDto,
+  ImportCsvDto,
+  ImportedCircuitDto,
+  SolveCircuitDto,
+  SolvedCircuitDto,
+} from './dto/circuits.dto';
 
 const READERS = 'Sign in to work on circuits.';
 
@@ -27,12 +40,21 @@ export class CircuitsService {
   importCsv(actor: Person, { csv, title, reference, line }: ImportCsvDto): ImportedCircuitDto {
     allow(isAtLeast(actor, 'trainee'), READERS);
     const { parts } = importCsv(csv);
-    const netlist = { ohmstead: 1, title, reference, ...(line ? { line } : {}), parts } as unknown as Netlist;
+    const netlist = {
+      ohmstead: 1,
+      title,
+      reference,
+      ...(line ? { line } : {}),
+      parts,
+    } as unknown as Netlist;
     return { netlist, problems: this.check(actor, netlist).problems };
   }
 
   /** The healthy set: volts, amps and watts everywhere. */
-  async solve(actor: Person, { netlist, asFound, lineVolts }: SolveCircuitDto): Promise<SolvedCircuitDto> {
+  async solve(
+    actor: Person,
+    { netlist, asFound, lineVolts }: SolveCircuitDto,
+  ): Promise<SolvedCircuitDto> {
     allow(isAtLeast(actor, 'trainee'), READERS);
     const sound = readNetlist(netlist);
     const healthy = await this.pool.run('solve', {

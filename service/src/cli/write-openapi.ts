@@ -14,7 +14,10 @@ async function main(): Promise<void> {
   process.env.DATABASE_FILE = join(folder, 'openapi.sqlite');
   const app = await NestFactory.create<NestExpressApplication>(AppModule, { logger: false });
   const description = describeApi(setUp(app));
-  writeFileSync(join(PROJECT_ROOT, 'service', 'openapi.json'), `${JSON.stringify(description, null, 2)}\n`);
+  writeFileSync(
+    join(PROJECT_ROOT, 'service', 'openapi.json'),
+    `${JSON.stringify(description, null, 2)}\n`,
+  );
   await app.close();
   rmSync(folder, { recursive: true, force: true });
 }

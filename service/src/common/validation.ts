@@ -8,7 +8,9 @@ function flatten(errors: ValidationError[], path: string): FieldProblem[] {
       pointer,
       code,
       message:
-        code === 'whitelistValidation' ? `“${property}” is not a field that can be set here.` : sentence(message),
+        code === 'whitelistValidation'
+          ? `“${property}” is not a field that can be set here.`
+          : sentence(message),
     }));
     return [...own, ...flatten(children ?? [], pointer)];
   });
@@ -27,7 +29,12 @@ export function validationPipe(): ValidationPipe {
     transform: true,
     exceptionFactory: (errors) => {
       const fields = flatten(errors, '');
-      return new ProblemException(400, 'bad-input', fields.map(({ message }) => message).join(' '), fields);
+      return new ProblemException(
+        400,
+        'bad-input',
+        fields.map(({ message }) => message).join(' '),
+        fields,
+      );
     },
   });
 }

@@ -68,7 +68,9 @@ export function readSettings(env: NodeJS.ProcessEnv): Settings {
   }
   const seed = env.SEED === undefined || env.SEED === '' ? 'demo' : env.SEED;
   if (seed !== 'demo' && seed !== 'none') {
-    problems.push(`SEED is “${env.SEED}”; it must be “demo” for the demo shop or “none” to start empty.`);
+    problems.push(
+      `SEED is “${env.SEED}”; it must be “demo” for the demo shop or “none” to start empty.`,
+    );
   }
   const smtpUrl = env.SMTP_URL ? env.SMTP_URL : null;
   if (smtpUrl !== null && !isUrl(smtpUrl)) {

@@ -12,8 +12,10 @@ export async function runMigrations(sequelize: Sequelize): Promise<string[]> {
   const umzug = new Umzug({
     migrations: MIGRATIONS.map(({ name, up, down }) => ({
       name,
-      up: () => sequelize.transaction((transaction) => up(sequelize.getQueryInterface(), transaction)),
-      down: () => sequelize.transaction((transaction) => down(sequelize.getQueryInterface(), transaction)),
+      up: () =>
+        sequelize.transaction((transaction) => up(sequelize.getQueryInterface(), transaction)),
+      down: () =>
+        sequelize.transaction((transaction) => down(sequelize.getQueryInterface(), transaction)),
     })),
     storage: new SequelizeStorage({ sequelize, tableName: 'migrations' }),
     logger: undefined,

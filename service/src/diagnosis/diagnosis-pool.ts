@@ -33,10 +33,14 @@ export class DiagnosisPool implements OnModuleDestroy {
   async run<N extends JobName>(name: N, input: Jobs[N]['input']): Promise<Jobs[N]['result']> {
     let answer: WorkerAnswer;
     try {
-      answer = (await this.threads().run({ name, input }, { signal: AbortSignal.timeout(LIMIT_MS) })) as WorkerAnswer;
+      answer = (await this.threads().run(
+        { name, input },
+        { signal: AbortSignal.timeout(LIMIT_MS) },
+      )) as WorkerAnswer;
     } catch (error) {
       this.logger.error(`Job ${name} failed: ${String(error)}`);
-      const isLate = (error as Error).name === 'AbortError' || (error as Error).name === 'TimeoutError';
+      const isLate =
+        (error as Error).name === 'AbortError' || (error as Error).name === 'TimeoutError';
       throw new ProblemException(
         503,
         isLate ? 'took-too-long' : 'worker-failed',

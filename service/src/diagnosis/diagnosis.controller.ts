@@ -4,7 +4,13 @@ import { ApiProblems } from '../common/decorators/api-problems.decorator';
 import { CurrentPerson } from '../common/decorators/current-person.decorator';
 import { Person } from '../people/person.model';
 import { DiagnosisService } from './diagnosis.service';
-import { AskClosedFormDto, ClosedFormDto, CompareDto, DiagnosisDto, WorkingDto } from './dto/diagnosis.dto';
+import {
+  AskClosedFormDto,
+  ClosedFormDto,
+  CompareDto,
+  DiagnosisDto,
+  WorkingDto,
+} from './dto/diagnosis.dto';
 
 @ApiTags('diagnosis')
 @ApiBearerAuth()
@@ -16,28 +22,40 @@ export class DiagnosisController {
   @HttpCode(200)
   @ApiOkResponse({ type: DiagnosisDto })
   @ApiProblems(401, 404, 422)
-  diagnose(@CurrentPerson() actor: Person, @Param('id', ParseIntPipe) id: number): Promise<DiagnosisDto> {
+  diagnose(
+    @CurrentPerson() actor: Person,
+    @Param('id', ParseIntPipe) id: number,
+  ): Promise<DiagnosisDto> {
     return this.diagnosis.diagnose(actor, id);
   }
 
   @Get('diagnosis')
   @ApiOkResponse({ type: DiagnosisDto })
   @ApiProblems(401, 404)
-  latest(@CurrentPerson() actor: Person, @Param('id', ParseIntPipe) id: number): Promise<DiagnosisDto> {
+  latest(
+    @CurrentPerson() actor: Person,
+    @Param('id', ParseIntPipe) id: number,
+  ): Promise<DiagnosisDto> {
     return this.diagnosis.latest(actor, id);
   }
 
   @Get('compare')
   @ApiOkResponse({ type: CompareDto })
   @ApiProblems(401, 404, 422)
-  compare(@CurrentPerson() actor: Person, @Param('id', ParseIntPipe) id: number): Promise<CompareDto> {
+  compare(
+    @CurrentPerson() actor: Person,
+    @Param('id', ParseIntPipe) id: number,
+  ): Promise<CompareDto> {
     return this.diagnosis.compare(actor, id);
   }
 
   @Get('working')
   @ApiOkResponse({ type: WorkingDto })
   @ApiProblems(401, 404, 422)
-  working(@CurrentPerson() actor: Person, @Param('id', ParseIntPipe) id: number): Promise<WorkingDto> {
+  working(
+    @CurrentPerson() actor: Person,
+    @Param('id', ParseIntPipe) id: number,
+  ): Promise<WorkingDto> {
     return this.diagnosis.working(actor, id);
   }
 

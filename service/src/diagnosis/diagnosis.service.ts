@@ -16,7 +16,14 @@ import { ReadingsService } from '../readings/readings.service';
 import { RulesService } from '../rules/rules.service';
 import { DiagnosisPool } from './diagnosis-pool';
 import { DiagnosisRow } from './diagnosis.model';
-import { type AskClosedFormDto, type ClosedFormDto, type CompareDto, type DiagnosisDto, presentDiagnosis, type WorkingDto } from './dto/diagnosis.dto';
+import {
+  type AskClosedFormDto,
+  type ClosedFormDto,
+  type CompareDto,
+  type DiagnosisDto,
+  presentDiagnosis,
+  type WorkingDto,
+} from './dto/diagnosis.dto';
 
 const READERS = 'Sign in to see the diagnosis.';
 
@@ -44,7 +51,10 @@ export class DiagnosisService {
       readings: rows.map(asReading),
       knowledge: await this.knowledgeFor(found),
     };
-    const inputHash = createHash('sha256').update(ENGINE_VERSION).update(JSON.stringify(input)).digest('hex');
+    const inputHash = createHash('sha256')
+      .update(ENGINE_VERSION)
+      .update(JSON.stringify(input))
+      .digest('hex');
     const known = await this.diagnoses.findOne({ where: { caseId, inputHash } });
     if (known) return presentDiagnosis(known);
     const start = performance.now();
@@ -81,7 +91,10 @@ export class DiagnosisService {
     allow(canReadCases(actor), READERS);
     const found = await this.cases.find(caseId);
     const rows = await this.readings.current(caseId);
-    const points = await this.pool.run('compare', { ...circuitOf(found), readings: rows.map(asReading) });
+    const points = await this.pool.run('compare', {
+      ...circuitOf(found),
+      readings: rows.map(asReading),
+    });
     return { points, lineVolts: found.lineVolts ?? found.netlist.line?.volts ?? 0 };
   }
 
@@ -99,11 +112,18 @@ export class DiagnosisService {
     if (!found.netlist.parts.some(({ ref }) => ref === ask.part)) {
       throw badField('/part', `There is no part ${ask.part} in this circuit.`);
     }
-    const form = await this.pool.run('closed-form', { ...circuitOf(found), part: ask.part, reading });
+    const form = await this.pool.run('closed-form', {
+      ...circuitOf(found),
+      part: ask.part,
+      reading,
+    });
     return form as unknown as ClosedFormDto;
   }
 
-  private readingAsked(rows: readonly ReadingRow[], { take, at, readingPart }: AskClosedFormDto): Reading {
+  private readingAsked(
+    rows: readonly ReadingRow[],
+    { take, at, readingPart }: AskClosedFormDto,
+  ): Reading {
     const place = placeOf({ take, at, part: readingPart });
     const row = rows.find((one) => one.place === place);
     if (!row) throw badField('/take', 'This reading has not been taken yet. Choose one that has.');

@@ -7,7 +7,13 @@ export type WorkerAnswer =
   | { ok: false; code: string; message: string; problems: NetlistProblem[] };
 
 /** Entry of a worker thread. */
-export default async function work({ name, input }: { name: JobName; input: Jobs[JobName]['input'] }): Promise<WorkerAnswer> {
+export default async function work({
+  name,
+  input,
+}: {
+  name: JobName;
+  input: Jobs[JobName]['input'];
+}): Promise<WorkerAnswer> {
   try {
     return { ok: true, result: await runJob(name, input as never) };
   } catch (error) {

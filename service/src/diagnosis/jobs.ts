@@ -26,7 +26,9 @@ export interface Jobs {
 }
 export type JobName = keyof Jobs;
 
-const RUNNERS: { [N in JobName]: (input: Jobs[N]['input']) => Jobs[N]['result'] | Promise<Jobs[N]['result']> } = {
+const RUNNERS: {
+  [N in JobName]: (input: Jobs[N]['input']) => Jobs[N]['result'] | Promise<Jobs[N]['result']>;
+} = {
   diagnose,
   compare,
   working: expectedWorking,
@@ -35,6 +37,9 @@ const RUNNERS: { [N in JobName]: (input: Jobs[N]['input']) => Jobs[N]['result'] 
 };
 
 /** Runs one job; the engine's own errors come through. */
-export async function runJob<N extends JobName>(name: N, input: Jobs[N]['input']): Promise<Jobs[N]['result']> {
+export async function runJob<N extends JobName>(
+  name: N,
+  input: Jobs[N]['input'],
+): Promise<Jobs[N]['result']> {
   return RUNNERS[name](input);
 }

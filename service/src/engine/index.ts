@@ -2,7 +2,7 @@
 export { compare } from './compare';
 export { diagnose, diagnoseWith } from './diagnose';
 export type * from './diagnosis-types';
-export { closedForm, expectedWorking } from './expected';
+export { closedForm, expectedWorking } from './working';
 export type { ClosedForm, Working } from './expected';
 export * from './errors';
 export { applyAsFound } from './netlist/as-found';

@@ -1,9 +1,20 @@
 import { Body, Controller, Get, Param, ParseIntPipe, Post, Query } from '@nestjs/common';
-import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiQuery, ApiTags } from '@nestjs/swagger';
+import {
+  ApiBearerAuth,
+  ApiCreatedResponse,
+  ApiOkResponse,
+  ApiQuery,
+  ApiTags,
+} from '@nestjs/swagger';
 import { ApiProblems } from '../common/decorators/api-problems.decorator';
 import { CurrentPerson } from '../common/decorators/current-person.decorator';
 import { Person } from '../people/person.model';
-import { CreateFamilyDto, CreateFamilyVersionDto, FamilyDto, FamilySummaryDto } from './dto/family.dto';
+import {
+  CreateFamilyDto,
+  CreateFamilyVersionDto,
+  FamilyDto,
+  FamilySummaryDto,
+} from './dto/family.dto';
 import { FamiliesService } from './families.service';
 
 @ApiTags('families')
@@ -16,7 +27,10 @@ export class FamiliesController {
   @ApiQuery({ name: 'search', required: false })
   @ApiOkResponse({ type: [FamilySummaryDto] })
   @ApiProblems(401)
-  list(@CurrentPerson() actor: Person, @Query('search') search?: string): Promise<FamilySummaryDto[]> {
+  list(
+    @CurrentPerson() actor: Person,
+    @Query('search') search?: string,
+  ): Promise<FamilySummaryDto[]> {
     return this.families.list(actor, String(search ?? ''));
   }
 

@@ -24,7 +24,8 @@ export class FamiliesModule implements OnModuleInit {
   /** Takes the netlists that ship with the project. */
   async onModuleInit(): Promise<void> {
     const { files, refused } = readNetlistFiles(join(PROJECT_ROOT, 'netlists'));
-    for (const { file, reason } of refused) this.logger.warn(`netlists/${file} was refused: ${reason}`);
+    for (const { file, reason } of refused)
+      this.logger.warn(`netlists/${file} was refused: ${reason}`);
     for (const file of files) await this.families.takeFile(file);
   }
 }

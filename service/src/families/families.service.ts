@@ -9,7 +9,13 @@ import { ConfirmedFault } from '../cases/confirmed-fault.model';
 import { DatabaseService } from '../database/database.service';
 import { type Netlist, readNetlist, requireSound } from '../engine';
 import { Person } from '../people/person.model';
-import type { CreateFamilyDto, CreateFamilyVersionDto, FamilyDto, FamilySummaryDto, SolvedDto } from './dto/family.dto';
+import type {
+  CreateFamilyDto,
+  CreateFamilyVersionDto,
+  FamilyDto,
+  FamilySummaryDto,
+  SolvedDto,
+} from './dto/family.dto';
 import { Family, type SetKind } from './family.model';
 import { canReadFamilies, canWriteFamilies } from './family.policy';
 import { FamilyVersion } from './family-version.model';
@@ -52,7 +58,9 @@ export class FamiliesService {
     allow(canReadFamilies(actor), 'Sign in to see the families.');
     const families = await this.families.findAll({ order: [['name', 'ASC']] });
     const words = search.toLowerCase().split(/\s+/).filter(Boolean);
-    const all = await Promise.all(families.map(async (family) => this.summary(family, await this.newest(family.id))));
+    const all = await Promise.all(
+      families.map(async (family) => this.summary(family, await this.newest(family.id))),
+    );
     return all.filter(({ name, tags, tubes, kind }) => {
       const text = [name, kind, ...tags, ...tubes].join(' ').toLowerCase();
       return words.every((word) => text.includes(word));
@@ -84,7 +92,10 @@ export class FamiliesService {
   }
 
   /** Starts a family. */
-  async create(actor: Person, { name, kind, tags, netlist, note }: CreateFamilyDto): Promise<FamilyDto> {
+  async create(
+    actor: Person,
+    { name, kind, tags, netlist, note }: CreateFamilyDto,
+  ): Promise<FamilyDto> {
     allow(canWriteFamilies(actor), 'Senior technicians and the owner keep the library.');
     const sound = soundNetlist(netlist);
     const id = await this.database.write(async (transaction) => {
@@ -99,7 +110,11 @@ export class FamiliesService {
   }
 
   /** Adds a version; the second of two people who changed the same one is told. */
-  async revise(actor: Person, id: number, { netlist, note, basedOn }: CreateFamilyVersionDto): Promise<FamilyDto> {
+  async revise(
+    actor: Person,
+    id: number,
+    { netlist, note, basedOn }: CreateFamilyVersionDto,
+  ): Promise<FamilyDto> {
     allow(canWriteFamilies(actor), 'Senior technicians and the owner keep the library.');
     const sound = soundNetlist(netlist);
     await this.database.write(async (transaction) => {
@@ -121,14 +136,27 @@ export class FamiliesService {
     await this.database.write(async (transaction) => {
       const known = await this.families.findOne({ where: { slug }, transaction });
       const family =
-        known ?? (await this.families.create({ slug, name, kind, tags, description }, { transaction }));
+        known ??
+        (await this.families.create({ slug, name, kind, tags, description }, { transaction }));
       if (known) await known.update({ name, kind, tags, description }, { transaction });
       const hash = contentHash(netlist);
       const newest = await this.newest(family.id, transaction);
-      const isKnown = await this.versions.count({ where: { familyId: family.id, contentHash: hash }, transaction });
+      const isKnown = await this.versions.count({
+        where: { familyId: family.id, contentHash: hash },
+        transaction,
+      });
       if (isKnown > 0) return;
-      const note = newest ? 'The file shipped with Ohmstead has changed.' : 'Shipped with Ohmstead.';
-      await this.addVersion(family.id, (newest?.version ?? 0) + 1, netlist, note, null, transaction);
+      const note = newest
+        ? 'The file shipped with Ohmstead has changed.'
+        : 'Shipped with Ohmstead.';
+      await this.addVersion(
+        family.id,
+        (newest?.version ?? 0) + 1,
+        netlist,
+        note,
+        null,
+        transaction,
+      );
     });
   }
 
@@ -151,7 +179,11 @@ export class FamiliesService {
 
   /** Newest version of a family; null when there is no such family. */
   newest(familyId: number, transaction?: Transaction): Promise<FamilyVersion | null> {
-    return this.versions.findOne({ where: { familyId }, order: [['version', 'DESC']], transaction });
+    return this.versions.findOne({
+      where: { familyId },
+      order: [['version', 'DESC']],
+      transaction,
+    });
   }
 
   private async addVersion(

@@ -39,7 +39,9 @@ export function readNetlistFiles(folder: string): { files: FamilyFile[]; refused
   } catch (error) {
     refused.push({ file: 'families.json', reason: reasonOf(error) });
   }
-  const names = readdirSync(folder).filter((name) => name.endsWith('.json') && !NOT_NETLISTS.has(name));
+  const names = readdirSync(folder).filter(
+    (name) => name.endsWith('.json') && !NOT_NETLISTS.has(name),
+  );
   for (const file of names.sort()) {
     try {
       const netlist = readNetlist(JSON.parse(readFileSync(join(folder, file), 'utf8')));

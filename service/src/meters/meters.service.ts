@@ -23,7 +23,10 @@ export class MetersService {
   /** The person's meters. */
   async list(actor: Person): Promise<MeterDto[]> {
     allow(isAtLeast(actor, 'trainee'), 'Sign in to see your meters.');
-    const rows = await this.meters.findAll({ where: { personId: actor.id }, order: [['id', 'ASC']] });
+    const rows = await this.meters.findAll({
+      where: { personId: actor.id },
+      order: [['id', 'ASC']],
+    });
     return rows.map(present);
   }
 
@@ -31,7 +34,10 @@ export class MetersService {
   async create(actor: Person, { name, ...settings }: CreateMeterDto): Promise<MeterDto> {
     allow(isAtLeast(actor, 'trainee'), 'Sign in to keep meters.');
     if (settings.ohmsPerVolt !== undefined && settings.fullScale === undefined) {
-      throw badField('/fullScale', 'A meter given in ohms per volt needs the full scale of its range.');
+      throw badField(
+        '/fullScale',
+        'A meter given in ohms per volt needs the full scale of its range.',
+      );
     }
     const row = await this.database.write((transaction) =>
       this.meters.create({ personId: actor.id, name: name.trim(), settings }, { transaction }),
@@ -44,12 +50,18 @@ export class MetersService {
    *
    * @throws ProblemException at the first reading whose meter is not.
    */
-  async settingsOf(actor: Person, ids: readonly (number | undefined)[]): Promise<Map<number, Meter>> {
+  async settingsOf(
+    actor: Person,
+    ids: readonly (number | undefined)[],
+  ): Promise<Map<number, Meter>> {
     const rows = await this.meters.findAll({ where: { personId: actor.id } });
     const known = new Map(rows.map(({ id, settings }) => [id, settings]));
     ids.forEach((id, i) => {
       if (id !== undefined && !known.has(id)) {
-        throw badField(`/readings/${i}/meterId`, 'This is not one of your meters. Choose another one.');
+        throw badField(
+          `/readings/${i}/meterId`,
+          'This is not one of your meters. Choose another one.',
+        );
       }
     });
     return known;

@@ -31,7 +31,10 @@ export class PartsDataService implements OnModuleInit {
     if ((await this.types.count()) === rows.length) return;
     await this.database.write(async (transaction) => {
       for (const row of rows) {
-        const known = await this.types.findOne({ where: { kind: row.kind, type: row.type }, transaction });
+        const known = await this.types.findOne({
+          where: { kind: row.kind, type: row.type },
+          transaction,
+        });
         if (known) await known.update(row, { transaction });
         else await this.types.create(row, { transaction });
       }
@@ -49,7 +52,8 @@ export class PartsDataService implements OnModuleInit {
     const rows = await this.types.findAll({ where, order: [['type', 'ASC']] });
     const words = (search ?? '').toLowerCase().split(/\s+/).filter(Boolean);
     const kept = rows.filter(({ type, details }) => {
-      const text = `${type} ${String(details.role ?? '')} ${String(details.base ?? '')}`.toLowerCase();
+      const text =
+        `${type} ${String(details.role ?? '')} ${String(details.base ?? '')}`.toLowerCase();
       return words.every((word) => text.includes(word));
     });
     return { total: kept.length, items: kept.slice(offset, offset + limit).map(present) };
@@ -59,7 +63,9 @@ export class PartsDataService implements OnModuleInit {
   async ratings(): Promise<Pick<Knowledge, 'tubes' | 'lamps'>> {
     const rows = await this.types.findAll();
     const of = (wanted: string) =>
-      rows.filter(({ kind }) => kind === wanted).map(({ type, volts, amps }) => ({ type, volts, amps }));
+      rows
+        .filter(({ kind }) => kind === wanted)
+        .map(({ type, volts, amps }) => ({ type, volts, amps }));
     return { tubes: of('tube'), lamps: of('lamp') };
   }
 }

@@ -58,16 +58,26 @@ export class PeopleService {
 
   /** Changes a role or blocks somebody; the last owner stays. */
   async change(actor: Person, id: number, change: ChangePersonDto): Promise<PersonDto> {
-    allow(canChange(actor, { id }), 'Only the owner changes people, and nobody changes their own role.');
+    allow(
+      canChange(actor, { id }),
+      'Only the owner changes people, and nobody changes their own role.',
+    );
     return this.database.write(async (transaction) => {
       const person = await this.people.findByPk(id, { transaction });
       if (!person) throw notFound('This person');
       await person.update(change, { transaction });
-      const owners = await this.people.count({ where: { role: 'owner', isBlocked: false }, transaction });
-      if (owners === 0) throw conflict('last-owner', 'The shop needs at least one owner who is not blocked.');
+      const owners = await this.people.count({
+        where: { role: 'owner', isBlocked: false },
+        transaction,
+      });
+      if (owners === 0)
+        throw conflict('last-owner', 'The shop needs at least one owner who is not blocked.');
       // Whoever is blocked is out at once, on every device.
       if (person.isBlocked) {
-        await this.tokens.update({ revokedAt: new Date() }, { where: { personId: id, revokedAt: null }, transaction });
+        await this.tokens.update(
+          { revokedAt: new Date() },
+          { where: { personId: id, revokedAt: null }, transaction },
+        );
       }
       return presentPerson(person, actor);
     });

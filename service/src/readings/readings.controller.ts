@@ -1,5 +1,22 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, ParseIntPipe, Post, Query } from '@nestjs/common';
-import { ApiBearerAuth, ApiCreatedResponse, ApiNoContentResponse, ApiOkResponse, ApiQuery, ApiTags } from '@nestjs/swagger';
+import {
+  Body,
+  Controller,
+  Delete,
+  Get,
+  HttpCode,
+  Param,
+  ParseIntPipe,
+  Post,
+  Query,
+} from '@nestjs/common';
+import {
+  ApiBearerAuth,
+  ApiCreatedResponse,
+  ApiNoContentResponse,
+  ApiOkResponse,
+  ApiQuery,
+  ApiTags,
+} from '@nestjs/swagger';
 import { ApiProblems } from '../common/decorators/api-problems.decorator';
 import { CurrentPerson } from '../common/decorators/current-person.decorator';
 import { Person } from '../people/person.model';
@@ -13,7 +30,11 @@ export class ReadingsController {
   constructor(private readonly readings: ReadingsService) {}
 
   @Get()
-  @ApiQuery({ name: 'history', required: false, description: '1 for replaced and withdrawn readings too.' })
+  @ApiQuery({
+    name: 'history',
+    required: false,
+    description: '1 for replaced and withdrawn readings too.',
+  })
   @ApiOkResponse({ type: [CaseReadingDto] })
   @ApiProblems(401, 404)
   list(

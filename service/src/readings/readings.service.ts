@@ -10,7 +10,12 @@ import { DatabaseService } from '../database/database.service';
 import { applyAsFound, checkReading, type Meter, type Reading, type Take } from '../engine';
 import { MetersService } from '../meters/meters.service';
 import { Person } from '../people/person.model';
-import { type CaseReadingDto, type EnterReadingDto, type EnterReadingsDto, presentReading } from './dto/reading.dto';
+import {
+  type CaseReadingDto,
+  type EnterReadingDto,
+  type EnterReadingsDto,
+  presentReading,
+} from './dto/reading.dto';
 import { placeOf, ReadingRow } from './reading.model';
 
 /** Readings with the set switched on. */
@@ -27,7 +32,12 @@ export class ReadingsService {
   ) {}
 
   /** Readings of a case by time; with `history` also the replaced and withdrawn ones. */
-  async list(actor: Person, caseId: number, hasHistory: boolean, place?: string): Promise<CaseReadingDto[]> {
+  async list(
+    actor: Person,
+    caseId: number,
+    hasHistory: boolean,
+    place?: string,
+  ): Promise<CaseReadingDto[]> {
     allow(canReadCases(actor), 'Sign in to see the readings.');
     await this.cases.find(caseId);
     const rows = await this.readings.findAll({
@@ -43,14 +53,27 @@ export class ReadingsService {
   }
 
   /** Enters readings, all or none; each takes the place of an earlier one at the same spot. */
-  async enter(actor: Person, caseId: number, { readings }: EnterReadingsDto): Promise<CaseReadingDto[]> {
+  async enter(
+    actor: Person,
+    caseId: number,
+    { readings }: EnterReadingsDto,
+  ): Promise<CaseReadingDto[]> {
     const found = await this.cases.find(caseId);
     allow(canRecord(actor, found), 'A closed case takes no readings. Reopen it first.');
     this.check(found, readings);
-    if (readings.some(({ take }) => POWERED.includes(take)) && !(await this.cases.hasAcknowledged(caseId, actor.id))) {
-      throw conflict('cautions-not-acknowledged', 'Read the cautions of this set before you enter readings with the power on.');
+    if (
+      readings.some(({ take }) => POWERED.includes(take)) &&
+      !(await this.cases.hasAcknowledged(caseId, actor.id))
+    ) {
+      throw conflict(
+        'cautions-not-acknowledged',
+        'Read the cautions of this set before you enter readings with the power on.',
+      );
     }
-    const meters = await this.meters.settingsOf(actor, readings.map(({ meterId }) => meterId));
+    const meters = await this.meters.settingsOf(
+      actor,
+      readings.map(({ meterId }) => meterId),
+    );
     const ids = await this.database.write(async (transaction) => {
       const out: number[] = [];
       for (const reading of readings) {
@@ -92,14 +115,21 @@ export class ReadingsService {
   private check(found: Case, readings: readonly EnterReadingDto[]): void {
     const netlist = applyAsFound(found.netlist, found.asFound);
     const errors = readings.flatMap(({ take, at, part, value, seen }, i) =>
-      checkReading(netlist, { take, at, part, value, seen } as Reading).map(({ path, message, code }) => ({
-        pointer: `/readings/${i}${path ?? ''}`,
-        message,
-        code,
-      })),
+      checkReading(netlist, { take, at, part, value, seen } as Reading).map(
+        ({ path, message, code }) => ({
+          pointer: `/readings/${i}${path ?? ''}`,
+          message,
+          code,
+        }),
+      ),
     );
     if (errors.length > 0) {
-      throw new ProblemException(422, 'reading-refused', errors.map(({ message }) => message).join(' '), errors);
+      throw new ProblemException(
+        422,
+        'reading-refused',
+        errors.map(({ message }) => message).join(' '),
+        errors,
+      );
     }
   }
 
@@ -134,7 +164,10 @@ export class ReadingsService {
     );
     await this.readings.update(
       { replacedAt: new Date(), replacedById: row.id },
-      { where: { caseId, place, replacedAt: null, withdrawnAt: null, id: { [Op.ne]: row.id } }, transaction },
+      {
+        where: { caseId, place, replacedAt: null, withdrawnAt: null, id: { [Op.ne]: row.id } },
+        transaction,
+      },
     );
     return row.id;
   }

@@ -32,7 +32,10 @@ export function readRuleFiles(folder: string): { files: RuleFile[]; refused: Ref
         const problems = checkRule(json);
         const { id } = json as Rule;
         if (problems.length === 0 && seen.has(id)) {
-          problems.push({ code: 'duplicate-id', message: `Another file has a rule “${id}” already.` });
+          problems.push({
+            code: 'duplicate-id',
+            message: `Another file has a rule “${id}” already.`,
+          });
         }
         if (problems.length > 0) {
           refused.push({ file, reason: problems.map(({ message }) => message).join(' ') });

@@ -32,7 +32,8 @@ export class RulesService implements OnModuleInit {
   async takeFolder(folder: string): Promise<void> {
     const { files, refused } = readRuleFiles(folder);
     this.refused = refused;
-    for (const { file, reason } of refused) this.logger.warn(`rules/${file} was refused: ${reason}`);
+    for (const { file, reason } of refused)
+      this.logger.warn(`rules/${file} was refused: ${reason}`);
     for (const file of files) await this.takeFile(file);
   }
 
@@ -52,18 +53,28 @@ export class RulesService implements OnModuleInit {
   /** One rule with its versions. */
   async get(actor: Person, key: string): Promise<RuleDto> {
     allow(isAtLeast(actor, 'trainee'), 'Sign in to see the rules.');
-    const rows = await this.rules.findAll({ where: { ruleKey: key }, order: [['version', 'DESC']] });
+    const rows = await this.rules.findAll({
+      where: { ruleKey: key },
+      order: [['version', 'DESC']],
+    });
     if (rows.length === 0) throw notFound('This rule');
     return {
       ...presentRule(rows[0]),
       content: rows[0].content,
-      versions: rows.map(({ version, createdAt, state }) => ({ version, at: createdAt.toISOString(), state })),
+      versions: rows.map(({ version, createdAt, state }) => ({
+        version,
+        at: createdAt.toISOString(),
+        state,
+      })),
     };
   }
 
   /** Rules that speak in a diagnosis. */
   async active(): Promise<Rule[]> {
-    const rows = await this.rules.findAll({ where: { state: 'active' }, order: [['rule_key', 'ASC']] });
+    const rows = await this.rules.findAll({
+      where: { state: 'active' },
+      order: [['rule_key', 'ASC']],
+    });
     return rows.map(({ content }) => content);
   }
 

@@ -40,12 +40,15 @@ export class CaseDto extends CaseSummaryDto {
   @ApiProperty() earlierWork: string;
   @ApiProperty({ type: Number, nullable: true }) familyVersion: number | null;
   @ApiProperty({ type: 'object', additionalProperties: true }) netlist: Netlist;
-  @ApiProperty({ type: 'array', items: { type: 'object', additionalProperties: true } }) asFound: AsFound[];
-  @ApiProperty({ type: Number, nullable: true, description: 'Line voltage of the day.' }) lineVolts: number | null;
+  @ApiProperty({ type: 'array', items: { type: 'object', additionalProperties: true } })
+  asFound: AsFound[];
+  @ApiProperty({ type: Number, nullable: true, description: 'Line voltage of the day.' })
+  lineVolts: number | null;
   @ApiProperty({ description: 'Whether the asking person has acknowledged the cautions.' })
   cautionAcknowledged: boolean;
   @ApiProperty({ type: [ConfirmedFaultDto] }) confirmedFaults: ConfirmedFaultDto[];
-  @ApiPropertyOptional({ enum: OUTCOMES, enumName: 'Outcome', nullable: true }) outcome: Outcome | null;
+  @ApiPropertyOptional({ enum: OUTCOMES, enumName: 'Outcome', nullable: true })
+  outcome: Outcome | null;
   @ApiProperty({ type: String, nullable: true }) closingNote: string | null;
   @ApiProperty({ type: String, format: 'date-time', nullable: true }) closedAt: string | null;
   @ApiProperty({ description: 'Send it back with a change.' }) version: number;
@@ -75,7 +78,12 @@ export function presentSummary(found: Case, readings: number): CaseSummaryDto {
 }
 
 /** A case whole, as the asking person may see and change it. */
-export function presentCase(found: Case, actor: Person, readings: number, cautionAcknowledged: boolean): CaseDto {
+export function presentCase(
+  found: Case,
+  actor: Person,
+  readings: number,
+  cautionAcknowledged: boolean,
+): CaseDto {
   return {
     ...presentSummary(found, readings),
     earlierWork: found.earlierWork,

@@ -1,9 +1,29 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, IsArray, IsIn, IsInt, IsNotEmpty, IsNumber, IsObject, IsOptional, IsString, Max, MaxLength, Min, ValidateNested } from 'class-validator';
+import {
+  ArrayMaxSize,
+  IsArray,
+  IsIn,
+  IsInt,
+  IsNotEmpty,
+  IsNumber,
+  IsObject,
+  IsOptional,
+  IsString,
+  Max,
+  MaxLength,
+  Min,
+  ValidateNested,
+} from 'class-validator';
 import { FAULT_MODES, type FaultMode } from '../../engine';
 import { CASE_STATES, type CaseState, type Outcome, OUTCOMES } from '../case.model';
-import { AS_FOUND_MOST, LINE_VOLTS_LEAST, LINE_VOLTS_MOST, SET_MOST, TEXT_MOST } from '../case.limits';
+import {
+  AS_FOUND_MOST,
+  LINE_VOLTS_LEAST,
+  LINE_VOLTS_MOST,
+  SET_MOST,
+  TEXT_MOST,
+} from '../case.limits';
 
 const LINE_SENTENCE = `Enter the line voltage in volts, ${LINE_VOLTS_LEAST} to ${LINE_VOLTS_MOST}.`;
 
@@ -78,7 +98,9 @@ export class ChangeCaseDto {
 
   @ApiPropertyOptional({ enum: CASE_STATES.filter((state) => state !== 'closed') })
   @IsOptional()
-  @IsIn(CASE_STATES.filter((state) => state !== 'closed'), { message: 'Choose one of the open states; closing is a step of its own.' })
+  @IsIn(CASE_STATES.filter((state) => state !== 'closed'), {
+    message: 'Choose one of the open states; closing is a step of its own.',
+  })
   state?: CaseState;
 
   @ApiPropertyOptional({ type: 'array', items: { type: 'object', additionalProperties: true } })

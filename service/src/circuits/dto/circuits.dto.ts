@@ -1,5 +1,14 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsArray, IsNotEmpty, IsNumber, IsObject, IsOptional, IsPositive, IsString, MaxLength } from 'class-validator';
+import {
+  IsArray,
+  IsNotEmpty,
+  IsNumber,
+  IsObject,
+  IsOptional,
+  IsPositive,
+  IsString,
+  MaxLength,
+} from 'class-validator';
 import type { Netlist } from '../../engine';
 
 export class CheckCircuitDto {
@@ -27,7 +36,11 @@ export class ImportCsvDto {
   @MaxLength(40)
   reference: string;
 
-  @ApiPropertyOptional({ type: 'object', additionalProperties: true, description: 'Line: hot, return, volts, hertz.' })
+  @ApiPropertyOptional({
+    type: 'object',
+    additionalProperties: true,
+    description: 'Line: hot, return, volts, hertz.',
+  })
   @IsOptional()
   @IsObject()
   line?: Record<string, unknown>;
@@ -67,7 +80,11 @@ export class OperatingPointDto {
     type: 'object',
     additionalProperties: {
       type: 'object',
-      properties: { acVolts: { type: 'number' }, dcVolts: { type: 'number' }, rippleVolts: { type: 'number' } },
+      properties: {
+        acVolts: { type: 'number' },
+        dcVolts: { type: 'number' },
+        rippleVolts: { type: 'number' },
+      },
     },
   })
   nodes: Record<string, { acVolts?: number; dcVolts?: number; rippleVolts?: number }>;
@@ -77,7 +94,11 @@ export class OperatingPointDto {
     additionalProperties: {
       type: 'object',
       required: ['volts', 'amps', 'watts'],
-      properties: { volts: { type: 'number' }, amps: { type: 'number' }, watts: { type: 'number' } },
+      properties: {
+        volts: { type: 'number' },
+        amps: { type: 'number' },
+        watts: { type: 'number' },
+      },
     },
   })
   parts: Record<string, { volts: number; amps: number; watts: number }>;

@@ -19,7 +19,9 @@ export const ApiProblems = (...statuses: number[]) =>
       ApiResponse({
         status,
         description: WORDS[status],
-        content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
+        content: {
+          'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } },
+        },
       }),
     ),
   );

@@ -50,15 +50,24 @@ function tell(error: unknown): Told {
   }
   if (error instanceof EngineError) return fromEngine(error);
   if (error instanceof UniqueConstraintError) {
-    return { status: 409, code: 'taken', detail: 'This is there already. Choose another name or reload the page.' };
+    return {
+      status: 409,
+      code: 'taken',
+      detail: 'This is there already. Choose another name or reload the page.',
+    };
   }
   if (error instanceof ForeignKeyConstraintError) {
-    return { status: 409, code: 'still-used', detail: 'Something else still refers to this, or what it refers to is gone. Reload the page.' };
+    return {
+      status: 409,
+      code: 'still-used',
+      detail: 'Something else still refers to this, or what it refers to is gone. Reload the page.',
+    };
   }
   if (isBodyError(error) && error.type === 'entity.parse.failed') {
     return { status: 400, code: 'not-json', detail: 'The request is not valid JSON.' };
   }
-  const status = error instanceof HttpException ? error.getStatus() : isBodyError(error) ? error.status : 500;
+  const status =
+    error instanceof HttpException ? error.getStatus() : isBodyError(error) ? error.status : 500;
   const plain = PLAIN[status];
   if (plain) return { status, code: plain[0], detail: plain[1] };
   return {
@@ -78,7 +87,9 @@ export class ProblemFilter implements ExceptionFilter {
     const response = host.switchToHttp().getResponse<Response>();
     const told = tell(error);
     if (told.status >= 500) {
-      this.logger.error(`${request.method} ${request.path}: ${error instanceof Error ? error.stack : String(error)}`);
+      this.logger.error(
+        `${request.method} ${request.path}: ${error instanceof Error ? error.stack : String(error)}`,
+      );
     }
     if (response.headersSent) {
       response.end();

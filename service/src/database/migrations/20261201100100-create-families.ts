@@ -33,7 +33,10 @@ export const createFamilies: Migration = {
       },
       { transaction },
     );
-    await queries.addIndex('family_versions', ['family_id', 'version'], { unique: true, transaction });
+    await queries.addIndex('family_versions', ['family_id', 'version'], {
+      unique: true,
+      transaction,
+    });
   },
   down: async (queries, transaction) => {
     await queries.dropTable('family_versions', { transaction });

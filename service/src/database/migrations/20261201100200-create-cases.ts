@@ -54,7 +54,10 @@ export const createCases: Migration = {
       },
       { transaction },
     );
-    await queries.addIndex('caution_acknowledgements', ['case_id', 'person_id'], { unique: true, transaction });
+    await queries.addIndex('caution_acknowledgements', ['case_id', 'person_id'], {
+      unique: true,
+      transaction,
+    });
   },
   down: async (queries, transaction) => {
     await queries.dropTable('caution_acknowledgements', { transaction });

@@ -1,4 +1,9 @@
-import { DataTypes, type ModelAttributeColumnOptions, type QueryInterface, type Transaction } from 'sequelize';
+import {
+  DataTypes,
+  type ModelAttributeColumnOptions,
+  type QueryInterface,
+  type Transaction,
+} from 'sequelize';
 
 /** One change of the schema, with its way back. */
 export interface Migration {
@@ -21,7 +26,11 @@ export const TIMES: Record<string, ModelAttributeColumnOptions> = {
 };
 
 /** A reference to a row of another table. */
-export function reference(table: string, isNeeded = true, onDelete = 'RESTRICT'): ModelAttributeColumnOptions {
+export function reference(
+  table: string,
+  isNeeded = true,
+  onDelete = 'RESTRICT',
+): ModelAttributeColumnOptions {
   return {
     type: DataTypes.INTEGER,
     allowNull: !isNeeded,

@@ -16,14 +16,16 @@ export class FaultDto {
 
 export class RuleVoiceDto {
   @ApiProperty() rule: string;
-  @ApiProperty({ enum: ['speaks-for', 'speaks-against', 'cause'] }) effect: 'speaks-for' | 'speaks-against' | 'cause';
+  @ApiProperty({ enum: ['speaks-for', 'speaks-against', 'cause'] }) effect:
+    'speaks-for' | 'speaks-against' | 'cause';
   @ApiPropertyOptional() factor?: number;
   @ApiProperty() because: string;
 }
 
 export class ReadingEvidenceDto {
   @ApiProperty({ description: 'Index into the readings used.' }) reading: number;
-  @ApiProperty({ type: Number, nullable: true, description: 'Null for OL.' }) predicted: number | null;
+  @ApiProperty({ type: Number, nullable: true, description: 'Null for OL.' }) predicted:
+    number | null;
   @ApiPropertyOptional() low?: number;
   @ApiPropertyOptional() high?: number;
   @ApiProperty() times: number;
@@ -68,7 +70,8 @@ export class ExpectedValueDto {
   @ApiProperty({ type: Number, nullable: true }) value: number | null;
   @ApiProperty({ type: Number, nullable: true }) low: number | null;
   @ApiProperty({ type: Number, nullable: true }) high: number | null;
-  @ApiPropertyOptional({ oneOf: [{ type: 'number' }, { type: 'string', enum: ['OL'] }] }) measured?: number | 'OL';
+  @ApiPropertyOptional({ oneOf: [{ type: 'number' }, { type: 'string', enum: ['OL'] }] })
+  measured?: number | 'OL';
   @ApiPropertyOptional() deviations?: number;
 }
 

@@ -9,7 +9,10 @@ export class DiagnosisDto {
   @ApiProperty({ format: 'date-time' }) at: string;
   @ApiProperty() engineVersion: string;
   @ApiProperty({ description: 'Milliseconds the ranking took.' }) ms: number;
-  @ApiProperty({ type: [Number], description: 'Readings it used, in the order the result counts them.' })
+  @ApiProperty({
+    type: [Number],
+    description: 'Readings it used, in the order the result counts them.',
+  })
   readingIds: number[];
   @ApiProperty({ type: DiagnosisResultDto }) result: DiagnosisResultDto;
 }
@@ -31,7 +34,8 @@ export class ComparePointDto {
   @ApiProperty({ type: Number, nullable: true }) low: number | null;
   @ApiProperty({ type: Number, nullable: true }) high: number | null;
   @ApiPropertyOptional() published?: number;
-  @ApiPropertyOptional({ oneOf: [{ type: 'number' }, { type: 'string', enum: ['OL'] }] }) measured?: number | 'OL';
+  @ApiPropertyOptional({ oneOf: [{ type: 'number' }, { type: 'string', enum: ['OL'] }] })
+  measured?: number | 'OL';
   @ApiPropertyOptional() deviations?: number;
   @ApiProperty() order: number;
 }
@@ -51,7 +55,10 @@ export class EquationDto {
 export class WorkingDto {
   @ApiProperty({ type: [String] }) nodes: string[];
   @ApiProperty({ type: [EquationDto] }) equations: EquationDto[];
-  @ApiProperty({ type: 'object', additionalProperties: { type: 'number' } }) solution: Record<string, number>;
+  @ApiProperty({ type: 'object', additionalProperties: { type: 'number' } }) solution: Record<
+    string,
+    number
+  >;
   @ApiProperty({ type: [String] }) notes: string[];
   @ApiProperty() residual: number;
   @ApiProperty() agreesWithSolver: boolean;
@@ -73,7 +80,9 @@ export class AskClosedFormDto {
     name: 'leads',
     validator: {
       validate: (value: unknown) =>
-        Array.isArray(value) && value.length === 2 && value.every((node) => typeof node === 'string'),
+        Array.isArray(value) &&
+        value.length === 2 &&
+        value.every((node) => typeof node === 'string'),
       defaultMessage: () => 'Name the two nodes the leads were on, red lead first.',
     },
   })

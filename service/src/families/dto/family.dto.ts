@@ -1,5 +1,15 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { ArrayMaxSize, IsArray, IsIn, IsInt, IsNotEmpty, IsObject, IsOptional, IsString, MaxLength } from 'class-validator';
+import {
+  ArrayMaxSize,
+  IsArray,
+  IsIn,
+  IsInt,
+  IsNotEmpty,
+  IsObject,
+  IsOptional,
+  IsString,
+  MaxLength,
+} from 'class-validator';
 import { FAULT_MODES, type FaultMode, type Netlist } from '../../engine';
 import { SET_KINDS, type SetKind } from '../family.model';
 import { FAMILY_NAME_MOST, NOTE_MOST, TAG_MOST, TAGS_MOST } from '../family.limits';

@@ -1,6 +1,15 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { IsInt, IsNumber, IsOptional, IsPositive, IsString, Max, MaxLength, Min } from 'class-validator';
+import {
+  IsInt,
+  IsNumber,
+  IsOptional,
+  IsPositive,
+  IsString,
+  Max,
+  MaxLength,
+  Min,
+} from 'class-validator';
 
 export class PartsQueryDto {
   @ApiPropertyOptional({ description: 'Part of the type or of its role.' })
@@ -44,7 +53,8 @@ export class PartTypeDto {
   @ApiProperty() volts: number;
   @ApiProperty() amps: number;
   @ApiProperty() source: string;
-  @ApiProperty({ description: '“confirmed” for the fields it names, else “from memory”.' }) status: string;
+  @ApiProperty({ description: '“confirmed” for the fields it names, else “from memory”.' })
+  status: string;
   @ApiPropertyOptional({ description: 'What the tube does.' }) role?: string;
   @ApiPropertyOptional({ type: [Number] }) heaterPins?: number[];
   @ApiPropertyOptional() maxHeaterCathodeVolts?: number;

@@ -1,6 +1,17 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsInt, IsOptional, IsString, MaxLength, ValidateBy, ValidateNested } from 'class-validator';
+import {
+  ArrayMaxSize,
+  ArrayMinSize,
+  IsArray,
+  IsIn,
+  IsInt,
+  IsOptional,
+  IsString,
+  MaxLength,
+  ValidateBy,
+  ValidateNested,
+} from 'class-validator';
 import { SEEN, type Seen, type Take, TAKES } from '../../engine';
 import { CLIENT_ID_MOST, NOTE_MOST, READINGS_MOST } from '../reading.limits';
 import { asReading, type ReadingRow } from '../reading.model';
@@ -12,7 +23,8 @@ function IsReadingValue() {
   return ValidateBy({
     name: 'readingValue',
     validator: {
-      validate: (value: unknown) => value === 'OL' || (typeof value === 'number' && Number.isFinite(value)),
+      validate: (value: unknown) =>
+        value === 'OL' || (typeof value === 'number' && Number.isFinite(value)),
       defaultMessage: () => 'A value is a number in volts, amps or ohms, or OL.',
     },
   });
@@ -24,14 +36,19 @@ function IsLeads() {
     name: 'leads',
     validator: {
       validate: (value: unknown) =>
-        Array.isArray(value) && value.length === 2 && value.every((node) => typeof node === 'string' && node.length <= 40),
+        Array.isArray(value) &&
+        value.length === 2 &&
+        value.every((node) => typeof node === 'string' && node.length <= 40),
       defaultMessage: () => 'Name the two nodes the leads were on, red lead first.',
     },
   });
 }
 
 export class EnterReadingDto {
-  @ApiPropertyOptional({ maxLength: CLIENT_ID_MOST, description: 'Sent twice with the same name it is entered once.' })
+  @ApiPropertyOptional({
+    maxLength: CLIENT_ID_MOST,
+    description: 'Sent twice with the same name it is entered once.',
+  })
   @IsOptional()
   @IsString()
   @MaxLength(CLIENT_ID_MOST)
@@ -41,7 +58,12 @@ export class EnterReadingDto {
   @IsIn(TAKES, { message: 'Choose what kind of reading it is.' })
   take: Take;
 
-  @ApiPropertyOptional({ type: [String], minItems: 2, maxItems: 2, description: 'Red lead, black lead.' })
+  @ApiPropertyOptional({
+    type: [String],
+    minItems: 2,
+    maxItems: 2,
+    description: 'Red lead, black lead.',
+  })
   @IsOptional()
   @IsLeads()
   at?: [string, string];
@@ -62,7 +84,9 @@ export class EnterReadingDto {
   @IsIn(SEEN, { message: 'Choose what was seen.' })
   seen?: Seen;
 
-  @ApiPropertyOptional({ description: 'One of the person’s meters; left out it is a 10 MΩ digital meter.' })
+  @ApiPropertyOptional({
+    description: 'One of the person’s meters; left out it is a 10 MΩ digital meter.',
+  })
   @IsOptional()
   @IsInt()
   meterId?: number;
@@ -93,12 +117,17 @@ export class CaseReadingDto {
   @ApiPropertyOptional() part?: string;
   @ApiPropertyOptional(VALUE_SCHEMA) value?: number | 'OL';
   @ApiPropertyOptional({ enum: SEEN, enumName: 'Seen' }) seen?: Seen;
-  @ApiPropertyOptional({ type: 'object', additionalProperties: true, description: 'The meter it was taken with.' })
+  @ApiPropertyOptional({
+    type: 'object',
+    additionalProperties: true,
+    description: 'The meter it was taken with.',
+  })
   meter?: Record<string, unknown>;
   @ApiProperty() note: string;
   @ApiProperty({ description: 'Who took it.' }) takenBy: string;
   @ApiProperty({ format: 'date-time' }) takenAt: string;
-  @ApiProperty({ description: 'A later reading at the same place counts instead.' }) isReplaced: boolean;
+  @ApiProperty({ description: 'A later reading at the same place counts instead.' })
+  isReplaced: boolean;
   @ApiProperty() isWithdrawn: boolean;
 }
 

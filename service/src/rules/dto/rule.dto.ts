@@ -12,7 +12,10 @@ export class RuleSummaryDto {
   @ApiProperty() pack: string;
   @ApiProperty() name: string;
   @ApiProperty({ description: 'The rule said as a sentence.' }) sentence: string;
-  @ApiProperty({ type: [String], enum: ['speaks-for', 'speaks-against', 'cause', 'advice', 'caution'] })
+  @ApiProperty({
+    type: [String],
+    enum: ['speaks-for', 'speaks-against', 'cause', 'advice', 'caution'],
+  })
   effects: string[];
   @ApiProperty() because: string;
   @ApiPropertyOptional({ type: RuleSourceDto }) source?: RuleSourceDto;

@@ -1,0 +1,152 @@
+import nerdamer from 'nerdamer';
+import 'nerdamer/Algebra.js';
+import 'nerdamer/Calculus.js';
+import 'nerdamer/Solve.js';
+import { EngineError } from '../errors';
+
+/** What the library's own types leave out. */
+interface WithEquations {
+  solveEquations(equations: string[], unknowns: string[]): [string, number | object][];
+  flush(): unknown;
+}
+
+const library = nerdamer as unknown as WithEquations;
+
+/** Significant digits of a coefficient. Short whole numbers keep the library's fractions quick. */
+const DIGITS = 12;
+/** Longest coefficient; beyond it fractions no longer fit a double when the answer is taken out. */
+const MOST_DIGITS = 40;
+
+/** Names that mean nothing to the library (`e`, `i` and `pi` do). */
+export function unknownName(index: number): string {
+  return `uq${index}`;
+}
+
+/** Name of the one symbol that stays in a closed form. */
+export const SYMBOL = 'xq';
+
+/** One equation: Σ coefficients·unknowns = constant. */
+export interface LinearRow {
+  coefficients: Float64Array;
+  constant: number;
+}
+
+/**
+ * Solves a small linear system through nerdamer. Every row is brought to whole numbers first:
+ * with 1 GΩ beside 0.01 Ω decimal fractions grow past what a double holds and the library answers
+ * NaN.
+ *
+ * @param rows n equations in n unknowns, n small: the time grows with its cube.
+ * @returns the unknowns; each coefficient counts with 12 digits.
+ * @throws EngineError `no-distinct-solution` when there is none.
+ */
+export function solveRows(rows: readonly LinearRow[]): Float64Array {
+  const n = rows.length;
+  const whole = rows.map(wholeRow);
+  try {
+    if (n === 1) {
+      const [coefficient, constant] = whole[0];
+      const text = nerdamer(`(${constant})/(${coefficient})`).evaluate().text('decimals');
+      return checked(Float64Array.of(Number(text)));
+    }
+    const names = rows.map((_, i) => unknownName(i));
+    const equations = whole.map((row) => {
+      const terms = row
+        .slice(0, n)
+        .map((value, i) => (value === 0n ? '' : `(${value})*${names[i]}`))
+        .filter((term) => term !== '');
+      return `${terms.join('+') || '0'}=${row[n]}`;
+    });
+    const answer = new Map(library.solveEquations(equations, names));
+    return checked(Float64Array.from(names, (name) => Number(answer.get(name))));
+  } catch (error) {
+    throw error instanceof EngineError ? error : noSolution();
+  } finally {
+    library.flush();
+  }
+}
+
+/** An expression in the symbol: one unknown of a small system solved with the symbol in it. */
+export function solveWithSymbol(equations: string[], unknowns: string[], wanted: string): string {
+  try {
+    const answer = new Map(library.solveEquations(equations, unknowns));
+    const expression = String(answer.get(wanted));
+    if (unknowns.some((name) => expression.includes(name))) throw noSolution();
+    return expression;
+  } finally {
+    library.flush();
+  }
+}
+
+/** Value of an expression for one value of the symbol. */
+export function evaluateAt(expression: string, value: number): number {
+  try {
+    const text = nerdamer(expression, { [SYMBOL]: decimal(value) })
+      .evaluate()
+      .text('decimals');
+    return Number(text);
+  } finally {
+    library.flush();
+  }
+}
+
+/** Values of the symbol for which an expression takes a value. */
+export function solveForSymbol(expression: string, value: number): number[] {
+  try {
+    const found = nerdamer(`${expression}=${decimal(value)}`).solveFor(SYMBOL) as unknown;
+    return [found]
+      .flat()
+      .map((root) => Number(nerdamer(String(root)).evaluate().text('decimals')))
+      .filter(Number.isFinite);
+  } catch {
+    // The library throws where there is nothing to solve for.
+    return [];
+  } finally {
+    library.flush();
+  }
+}
+
+/** A number as the library reads it: plain decimal, no exponent letter (`e` is Euler's number). */
+export function decimal(value: number): string {
+  const [mantissa, exponent] = value.toExponential(DIGITS + 2).split('e');
+  return `(${mantissa}*10^(${Number(exponent)}))`;
+}
+
+/** A row scaled to whole numbers, the constant last. */
+function wholeRow({ coefficients, constant }: LinearRow): bigint[] {
+  let least = Infinity;
+  let most = -Infinity;
+  for (const value of coefficients) {
+    if (value === 0) continue;
+    const power = Math.floor(Math.log10(Math.abs(value)));
+    least = Math.min(least, power);
+    most = Math.max(most, power);
+  }
+  if (most === -Infinity) throw noSolution();
+  const places = Math.min(DIGITS - 1 - least, MOST_DIGITS - most);
+  return [...coefficients, constant].map((value) => wholeOf(value, places));
+}
+
+/** value·10^places as a whole number, from 12 significant digits. */
+function wholeOf(value: number, places: number): bigint {
+  if (value === 0) return 0n;
+  const [mantissa, power] = value.toExponential(DIGITS - 1).split('e');
+  const digits = BigInt(mantissa.replace('.', ''));
+  const shift = Number(power) - (DIGITS - 1) + places;
+  if (shift >= 0) return digits * 10n ** BigInt(shift);
+  const divisor = 10n ** BigInt(-shift);
+  const half = digits < 0n ? -divisor / 2n : divisor / 2n;
+  return (digits + half) / divisor;
+}
+
+function checked(values: Float64Array): Float64Array {
+  if (values.every(Number.isFinite)) return values;
+  throw noSolution();
+}
+
+function noSolution(): EngineError {
+  return new EngineError(
+    'no-distinct-solution',
+    'The nodal equations have no single solution. Check that every node has a path to the line or to the reference.',
+  );
+}
