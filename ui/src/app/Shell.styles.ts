@@ -43,6 +43,8 @@ export const useShellStyles = makeStyles({
     scrollbarWidth: 'none',
     [atMost.phone]: { order: 3, width: '100%', flexBasis: '100%' },
   },
+  // In a case the sections stand at the bottom; a second row of links would push the pad off the screen.
+  navInCase: { [atMost.phone]: { display: 'none' } },
   link: {
     display: 'inline-flex',
     alignItems: 'center',

@@ -39,7 +39,10 @@ export function Component() {
           <Mark />
           Ohmstead
         </Link>
-        <nav aria-label="Main" className={styles.nav}>
+        <nav
+          aria-label="Main"
+          className={mergeClasses(styles.nav, pathname.startsWith('/cases/') && styles.navInCase)}
+        >
           {links.map(({ to, label, isExact }) => (
             <NavLink
               key={to}

@@ -3,7 +3,7 @@ interface MarkProps {
   size?: number;
 }
 
-/** Our mark: a house whose roof is drawn like a resistor. Decoration, the name stands beside it. */
+/** Our mark: the sign of the ohm under a roof. Decoration, the name stands beside it. */
 export function Mark({ size = 28 }: MarkProps) {
   return (
     <svg
@@ -12,14 +12,13 @@ export function Mark({ size = 28 }: MarkProps) {
       viewBox="0 0 48 48"
       fill="none"
       stroke="currentColor"
-      strokeWidth="3.4"
+      strokeWidth="3.6"
       strokeLinecap="round"
       strokeLinejoin="round"
       aria-hidden="true"
     >
-      <path d="M3 25h4.5L12 15l6 15 6-21 6 21 6-15 4.5 10H45" />
-      <path d="M11 33v10h26V33" />
-      <circle cx="24" cy="38" r="2.2" fill="currentColor" stroke="none" />
+      <path d="M4 22 24 6l20 16" />
+      <path d="M9 42h10c-4.5-3.5-7-7.5-7-12a12 12 0 0 1 24 0c0 4.5-2.5 8.5-7 12h10" />
     </svg>
   );
 }

@@ -35,6 +35,11 @@ export const useTableStyles = makeStyles({
     verticalAlign: 'top',
     fontWeight: 'inherit',
   },
+  plain: {
+    padding: `${tokens.spacingVerticalM} ${tokens.spacingHorizontalM}`,
+    verticalAlign: 'top',
+    whiteSpace: 'nowrap',
+  },
   number: {
     padding: `${tokens.spacingVerticalM} ${tokens.spacingHorizontalM}`,
     textAlign: 'right',

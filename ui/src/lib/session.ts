@@ -4,15 +4,27 @@ import { apiClient, refreshSession } from './api-client';
 import { type Person, type SignedIn } from './api-model';
 import { hasStatus } from './api-problem';
 
+/** Remembers that this browser had a session, so that a first visit asks for none. Holds no secret. */
+const HINT = 'ohmstead-was-here';
+
+function remember(isIn: boolean): void {
+  if (isIn) localStorage.setItem(HINT, '1');
+  else localStorage.removeItem(HINT);
+}
+
 /** Query options of the person who is signed in; null when nobody is. */
 export function sessionQuery() {
   return queryOptions({
     queryKey: ['session'],
     queryFn: async (): Promise<Person | null> => {
+      if (!localStorage.getItem(HINT)) return null;
       try {
         return (await refreshSession()).person;
       } catch (error) {
-        if (hasStatus(error, 401) || hasStatus(error, 403)) return null;
+        if (hasStatus(error, 401) || hasStatus(error, 403)) {
+          remember(false);
+          return null;
+        }
         throw error;
       }
     },
@@ -33,12 +45,14 @@ export function useSessionActions() {
   const enter = (signedIn: SignedIn) => {
     client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'session' });
     keepAccessToken(signedIn.accessToken);
+    remember(true);
     client.setQueryData(sessionQuery().queryKey, signedIn.person);
   };
   const leave = async () => {
     // Signing out must also work while the service is away: the token is forgotten either way.
     await apiClient.post('/auth/sign-out').catch(() => undefined);
     keepAccessToken(null);
+    remember(false);
     client.setQueryData(sessionQuery().queryKey, null);
     client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'session' });
   };

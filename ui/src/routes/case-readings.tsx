@@ -14,7 +14,7 @@ const CircuitPane = lazy(() =>
 const useStyles = makeStyles({
   three: {
     display: 'grid',
-    gridTemplateColumns: 'minmax(400px, 5fr) minmax(320px, 5fr) minmax(320px, 4fr)',
+    gridTemplateColumns: 'minmax(480px, 6fr) minmax(300px, 5fr) minmax(300px, 4fr)',
     gap: tokens.spacingHorizontalXXL,
     alignItems: 'start',
   },

@@ -18,7 +18,9 @@ import {
   type PartsTable as Table,
   usePartsData,
 } from '@/features/parts-data/api/get-parts-data';
+import { PartsCards } from '@/features/parts-data/components/PartsCards';
 import { PartsTable } from '@/features/parts-data/components/PartsTable';
+import { useMediaQuery } from '@/hooks/useMediaQuery';
 
 const useStyles = makeStyles({
   root: { maxWidth: '1200px', margin: '0 auto' },
@@ -48,6 +50,8 @@ export function Component() {
   const [offset, setOffset] = useState(0);
   const page = usePartsData({ table, search: useDeferredValue(search), offset });
   const total = page.data?.total ?? 0;
+  const Parts = useMediaQuery('(max-width: 759px)') ? PartsCards : PartsTable;
+  const caption = table === 'tubes' ? 'Heater ratings of tubes' : 'Ratings of lamps';
   const last = Math.min(offset + PARTS_PAGE, total);
   return (
     <div className={styles.root}>
@@ -92,10 +96,7 @@ export function Component() {
         </EmptyState>
       ) : (
         <>
-          <PartsTable
-            caption={table === 'tubes' ? 'Heater ratings of tubes' : 'Ratings of lamps'}
-            items={page.data.items}
-          />
+          <Parts caption={caption} items={page.data.items} />
           <div className={styles.pages}>
             <Text role="status">
               {offset + 1} to {last} of {total}

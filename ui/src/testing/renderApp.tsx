@@ -14,6 +14,8 @@ import { keepAccessToken } from '@/lib/access-token';
  */
 export function renderApp(path = '/') {
   keepAccessToken(null);
+  // As in a browser that had a session: the service decides whether it still has one.
+  localStorage.setItem('ohmstead-was-here', '1');
   const router = createMemoryRouter(routes, { initialEntries: [path] });
   const user = userEvent.setup();
   const view = render(

@@ -53,6 +53,12 @@ export const paperTheme: Theme = {
   colorNeutralStroke1Hover: '#b9aa91',
   colorNeutralStroke2: '#e0d5c1',
   colorNeutralStroke3: '#ebe2d2',
+  colorStatusWarningBackground1: '#fbecc6',
+  colorStatusWarningBorder1: '#dcbf78',
+  colorStatusWarningBorder2: '#c9a754',
+  colorStatusWarningForeground1: '#664600',
+  colorStatusWarningForeground2: '#664600',
+  colorStatusWarningForeground3: '#7a5400',
   colorNeutralStrokeAccessible: '#776a58',
   colorNeutralStrokeAccessibleHover: '#5f5446',
 };

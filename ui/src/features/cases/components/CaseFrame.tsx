@@ -32,6 +32,7 @@ const useStyles = makeStyles({
     flexWrap: 'wrap',
     alignItems: 'center',
     gap: `${tokens.spacingVerticalXS} ${tokens.spacingHorizontalM}`,
+    [atMost.phone]: { marginBottom: tokens.spacingVerticalL },
   },
   title: {
     margin: 0,
@@ -42,6 +43,7 @@ const useStyles = makeStyles({
     [atMost.phone]: { fontSize: tokens.fontSizeBase500, lineHeight: tokens.lineHeightBase500 },
   },
   quiet: { color: tokens.colorNeutralForeground3 },
+  family: { [atMost.phone]: { display: 'none' } },
   nav: {
     display: 'flex',
     margin: `${tokens.spacingVerticalM} 0 ${tokens.spacingVerticalXL}`,
@@ -111,7 +113,8 @@ export function CaseFrame({ repair, linkTo, children }: CaseFrameProps) {
         <h1 className={styles.title}>{repair.set}</h1>
         <CaseState state={repair.state} />
         <Text className={styles.quiet}>
-          {[number, repair.familyName].filter(Boolean).join(' · ')}
+          {number}
+          {repair.familyName && <span className={styles.family}> · {repair.familyName}</span>}
         </Text>
       </div>
       <nav aria-label="Sections of this case" className={styles.nav}>

@@ -36,7 +36,7 @@ export function CaseTable({ cases, linkTo }: CaseTableProps) {
         <tbody>
           {cases.map((one) => (
             <tr key={one.id} className={table.row}>
-              <td className={table.cell}>{caseNumber(one)}</td>
+              <td className={table.plain}>{caseNumber(one)}</td>
               <th scope="row" className={table.cell}>
                 <Link to={linkTo(one.id)} className={table.link}>
                   {one.set}

@@ -8,7 +8,7 @@ interface PartsTableProps {
   items: readonly PartFact[];
 }
 
-/** Ratings of tubes or lamps, each with where it comes from. */
+/** Ratings of tubes or lamps, each with where it comes from; for screens with room. */
 export function PartsTable({ caption, items }: PartsTableProps) {
   const table = useTableStyles();
   return (
@@ -30,13 +30,9 @@ export function PartsTable({ caption, items }: PartsTableProps) {
               <th scope="row" className={table.cell}>
                 {item.type}
               </th>
-              <td className={table.cell}>{formatQuantity(item.volts, 'V', 3)}</td>
-              <td className={table.cell}>{formatQuantity(item.amps, 'A', 3)}</td>
-              <td className={table.cell}>
-                {[item.role, item.base, item.beadColour && `${item.beadColour} bead`, item.note]
-                  .filter(Boolean)
-                  .join(', ')}
-              </td>
+              <td className={table.plain}>{formatQuantity(item.volts, 'V', 3)}</td>
+              <td className={table.plain}>{formatQuantity(item.amps, 'A', 3)}</td>
+              <td className={table.cell}>{remarksOf(item)}</td>
               <td className={table.cell}>{item.source}</td>
               <td className={table.cell}>
                 <StatusBadge tone={item.status.startsWith('from memory') ? 'warn' : 'calm'}>
@@ -49,4 +45,9 @@ export function PartsTable({ caption, items }: PartsTableProps) {
       </table>
     </div>
   );
+}
+
+/** What else is known about a type, in a line. */
+export function remarksOf({ role, base, beadColour, note }: PartFact): string {
+  return [role, base, beadColour && `${beadColour} bead`, note].filter(Boolean).join(', ');
 }
