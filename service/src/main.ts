@@ -21,6 +21,8 @@ async function start(): Promise<void> {
   setUp(app);
   SwaggerModule.setup('api/docs', app, describeApi(app), { jsonDocumentUrl: 'api/docs-json' });
   const hasUi = serveUi(app);
+  // Families and rules are taken from their files now; the demo shop builds on them.
+  await app.init();
   const hasDemo = await app.get(SeedService).seedIfEmpty();
   await app.listen(port);
   const address = app.getHttpServer().address() as { port: number };

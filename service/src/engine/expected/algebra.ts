@@ -25,29 +25,35 @@ export function unknownName(index: number): string {
 /** Name of the one symbol that stays in a closed form. */
 export const SYMBOL = 'xq';
 
-/** One equation: Σ coefficients·unknowns = constant. */
-export interface LinearRow {
-  coefficients: Float64Array;
+/** Nodal equation: (sum of `own`)·unknown[place] − Σ others[i]·unknown[i] = constant. */
+export interface NodalRow {
+  place: number;
+  /** Every conductance at this node in siemens; summed exactly, so that a small one counts. */
+  own: number[];
+  /** Conductance to each other unknown in siemens. */
+  others: Float64Array;
+  /** Amps driven into the node. */
   constant: number;
 }
 
 /**
- * Solves a small linear system through nerdamer. Every row is brought to whole numbers first:
- * with 1 GΩ beside 0.01 Ω decimal fractions grow past what a double holds and the library answers
- * NaN.
+ * Solves a small set of nodal equations through nerdamer. Every row is brought to whole numbers
+ * first: with 1 GΩ beside 0.01 Ω decimal fractions are cut short on reading and grow past what a
+ * double holds on the way, and the library answers NaN.
  *
  * @param rows n equations in n unknowns, n small: the time grows with its cube.
- * @returns the unknowns; each coefficient counts with 12 digits.
+ * @returns the unknowns; each conductance counts with 12 digits.
  * @throws EngineError `no-distinct-solution` when there is none.
  */
-export function solveRows(rows: readonly LinearRow[]): Float64Array {
+export function solveRows(rows: readonly NodalRow[]): Float64Array {
   const n = rows.length;
   const whole = rows.map(wholeRow);
   try {
     if (n === 1) {
       const [coefficient, constant] = whole[0];
-      const text = nerdamer(`(${constant})/(${coefficient})`).evaluate().text('decimals');
-      return checked(Float64Array.of(Number(text)));
+      return checked(
+        Float64Array.of(ratioOf(nerdamer(`(${constant})/(${coefficient})`).toString())),
+      );
     }
     const names = rows.map((_, i) => unknownName(i));
     const equations = whole.map((row) => {
@@ -55,7 +61,7 @@ export function solveRows(rows: readonly LinearRow[]): Float64Array {
         .slice(0, n)
         .map((value, i) => (value === 0n ? '' : `(${value})*${names[i]}`))
         .filter((term) => term !== '');
-      return `${terms.join('+') || '0'}=${row[n]}`;
+      return `${terms.join('+')}=${row[n]}`;
     });
     const answer = new Map(library.solveEquations(equations, names));
     return checked(Float64Array.from(names, (name) => Number(answer.get(name))));
@@ -64,6 +70,12 @@ export function solveRows(rows: readonly LinearRow[]): Float64Array {
   } finally {
     library.flush();
   }
+}
+
+/** Value of a reduced fraction such as `3/8`. */
+function ratioOf(text: string): number {
+  const [above, below] = text.split('/');
+  return Number(above) / Number(below ?? 1);
 }
 
 /** An expression in the symbol: one unknown of a small system solved with the symbol in it. */
@@ -81,7 +93,7 @@ export function solveWithSymbol(equations: string[], unknowns: string[], wanted:
 /** Value of an expression for one value of the symbol. */
 export function evaluateAt(expression: string, value: number): number {
   try {
-    const text = nerdamer(expression, { [SYMBOL]: decimal(value) })
+    const text = nerdamer(expression, { [SYMBOL]: exactly(value) })
       .evaluate()
       .text('decimals');
     return Number(text);
@@ -93,7 +105,7 @@ export function evaluateAt(expression: string, value: number): number {
 /** Values of the symbol for which an expression takes a value. */
 export function solveForSymbol(expression: string, value: number): number[] {
   try {
-    const found = nerdamer(`${expression}=${decimal(value)}`).solveFor(SYMBOL) as unknown;
+    const found = nerdamer(`${expression}=${exactly(value)}`).solveFor(SYMBOL) as unknown;
     return [found]
       .flat()
       .map((root) => Number(nerdamer(String(root)).evaluate().text('decimals')))
@@ -106,25 +118,26 @@ export function solveForSymbol(expression: string, value: number): number[] {
   }
 }
 
-/** A number as the library reads it: plain decimal, no exponent letter (`e` is Euler's number). */
-export function decimal(value: number): string {
-  const [mantissa, exponent] = value.toExponential(DIGITS + 2).split('e');
-  return `(${mantissa}*10^(${Number(exponent)}))`;
+/**
+ * A number as the library keeps all its digits: a whole number over a power of ten. (Decimals are
+ * rounded to a short fraction on reading, and the `e` of an exponent is Euler's number.)
+ */
+export function exactly(value: number): string {
+  if (value === 0) return '0';
+  const [mantissa, power] = value.toExponential(DIGITS + 2).split('e');
+  const digits = mantissa.replace('.', '');
+  const shift = Number(power) - (DIGITS + 2);
+  return shift >= 0 ? `(${digits}${'0'.repeat(shift)})` : `(${digits}/1${'0'.repeat(-shift)})`;
 }
 
 /** A row scaled to whole numbers, the constant last. */
-function wholeRow({ coefficients, constant }: LinearRow): bigint[] {
-  let least = Infinity;
-  let most = -Infinity;
-  for (const value of coefficients) {
-    if (value === 0) continue;
-    const power = Math.floor(Math.log10(Math.abs(value)));
-    least = Math.min(least, power);
-    most = Math.max(most, power);
-  }
-  if (most === -Infinity) throw noSolution();
-  const places = Math.min(DIGITS - 1 - least, MOST_DIGITS - most);
-  return [...coefficients, constant].map((value) => wholeOf(value, places));
+function wholeRow({ place, own, others, constant }: NodalRow): bigint[] {
+  const powers = own.filter((value) => value > 0).map((value) => Math.floor(Math.log10(value)));
+  if (powers.length === 0) throw noSolution();
+  const places = Math.min(DIGITS - 1 - Math.min(...powers), MOST_DIGITS - Math.max(...powers));
+  const row = Array.from(others, (value) => -wholeOf(value, places));
+  row[place] = own.reduce((sum, value) => sum + wholeOf(value, places), 0n);
+  return [...row, wholeOf(constant, places)];
 }
 
 /** value·10^places as a whole number, from 12 significant digits. */

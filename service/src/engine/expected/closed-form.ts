@@ -2,7 +2,7 @@ import { EngineError } from '../errors';
 import { Elimination } from '../solver/steady-state/elimination';
 import { formatQuantity } from '../units';
 import {
-  decimal,
+  exactly,
   evaluateAt,
   solveForSymbol,
   solveWithSymbol,
@@ -52,11 +52,11 @@ export function closedFormOf(
   const branch = branchOf(system, part);
   const shape = shapeOf(system, branch, target);
   const isFlat = shape.gain === 0;
-  const expression = isFlat ? decimal(shape.base) : expressionOf(shape);
   const ohms = 1 / branch.siemens;
   const here = voltsWith(system, branch, ohms, target);
   const scale = Math.max(Math.abs(here), Math.abs(measured), Math.abs(shape.base), 1e-9);
-  const meets = Math.abs(evaluateAt(expression, ohms) - here) <= AGREEMENT * scale;
+  const expression = new Expression(shape, ohms, scale);
+  const meets = Math.abs(expression.at(ohms) - here) <= AGREEMENT * scale;
   const formula = formulaOf(system, shape, part, target);
   const answer = (impliedValue: number | null, note: string): ClosedFormAnswer => ({
     part,
@@ -74,7 +74,7 @@ export function closedFormOf(
     );
   }
   if (isFlat) return answer(null, `This reading does not depend on ${part}.`);
-  const implied = solveForSymbol(expression, measured).find((value) => Number.isFinite(value));
+  const implied = expression.ohmsFor(measured);
   const volts = formatQuantity(measured, 'V', 4);
   if (implied === undefined) {
     return answer(null, `No resistance of ${part} alone brings this reading to ${volts}.`);
@@ -165,20 +165,52 @@ function put(drive: Float64Array, node: number | undefined, amps: number): void 
   if (node !== undefined) drive[node] += amps;
 }
 
-/** Solves the last equations with the symbol in them: voltage, part's current, part's voltage. */
-function expressionOf({ base, gain, rest }: Shape): string {
-  if (rest === Infinity) return `${decimal(base)}+${decimal(gain)}*${SYMBOL}`;
-  const [volts, amps, across] = [unknownName(0), unknownName(1), unknownName(2)];
-  // One volt behind `rest` drives the part; the wanted voltage is base + gain times its current.
-  return solveWithSymbol(
-    [
-      `${volts}-${decimal(gain)}*${amps}=${decimal(base)}`,
-      `${across}+${decimal(rest)}*${amps}=1`,
-      `${across}-${SYMBOL}*${amps}=0`,
-    ],
-    [volts, amps, across],
-    volts,
-  );
+/**
+ * The voltage as an expression of the symbol, solved by nerdamer from the last equations: wanted
+ * voltage, part's current, part's voltage. Everything is in proportion (ohms to `unit`, volts to
+ * `scale`), since the library keeps the most digits near 1.
+ */
+class Expression {
+  private readonly text: string;
+  private readonly unit: number;
+
+  constructor(
+    { base, gain, rest }: Shape,
+    ohms: number,
+    private readonly scale: number,
+  ) {
+    this.unit = rest === Infinity ? ohms : rest;
+    if (gain === 0) {
+      this.text = exactly(base / scale);
+      return;
+    }
+    if (rest === Infinity) {
+      this.text = `${exactly(base / scale)}+${exactly((gain * ohms) / scale)}*${SYMBOL}`;
+      return;
+    }
+    const [volts, amps, across] = [unknownName(0), unknownName(1), unknownName(2)];
+    // One volt behind the rest drives the part; the wanted voltage is base + gain times its current.
+    this.text = solveWithSymbol(
+      [
+        `${volts}-${exactly(gain / rest / scale)}*${amps}=${exactly(base / scale)}`,
+        `${across}+${amps}=1`,
+        `${across}-${SYMBOL}*${amps}=0`,
+      ],
+      [volts, amps, across],
+      volts,
+    );
+  }
+
+  /** Volts with the part at some ohms. */
+  at(ohms: number): number {
+    return this.scale * evaluateAt(this.text, ohms / this.unit);
+  }
+
+  /** Ohms that lead to some volts. */
+  ohmsFor(volts: number): number | undefined {
+    const [root] = solveForSymbol(this.text, volts / this.scale);
+    return root === undefined ? undefined : root * this.unit;
+  }
 }
 
 /** The voltage asked for with the part at some value, by the numeric elimination. */

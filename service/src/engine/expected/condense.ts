@@ -1,4 +1,4 @@
-import { type LinearRow, solveRows } from './algebra';
+import { type NodalRow, solveRows } from './algebra';
 import type { Network } from './network';
 
 /** Systems up to this size are handed over whole; the library's time grows with the cube. */
@@ -72,16 +72,16 @@ function rowsOf(
   nodes: readonly number[],
   amps: Float64Array,
   isLocal = false,
-): LinearRow[] {
+): NodalRow[] {
   return nodes.map((node, i) => {
-    const coefficients = new Float64Array(nodes.length);
-    coefficients[i] = network.leak[node];
+    const own = [network.leak[node]];
+    const others = new Float64Array(nodes.length);
     for (const [other, siemens] of network.between[node]) {
-      coefficients[i] += siemens;
+      own.push(siemens);
       const j = nodes.indexOf(other);
-      if (j >= 0) coefficients[j] -= siemens;
+      if (j >= 0) others[j] = siemens;
     }
-    return { coefficients, constant: amps[isLocal ? i : node] };
+    return { place: i, own, others, constant: amps[isLocal ? i : node] };
   });
 }
 
