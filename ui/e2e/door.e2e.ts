@@ -23,11 +23,11 @@ describe('an empty shop', () => {
     await page.getByLabel('Your name').fill('Robin Vance');
     await page.getByLabel('E-mail address').fill('robin@corner.example');
     await page.getByLabel('Password').fill('short');
-    await page.getByRole('button', { name: 'Set up the shop' }).click();
+    await page.getByRole('button', { name: 'Open the shop' }).click();
     await page.getByText('at least 10 characters').waitFor();
     expect(await page.getByLabel('Name of the shop').inputValue()).toBe('Corner Radio Service');
     await page.getByLabel('Password').fill('four quiet tubes glow');
-    await page.getByRole('button', { name: 'Set up the shop' }).click();
+    await page.getByRole('button', { name: 'Open the shop' }).click();
     await page.getByRole('heading', { name: 'Bench', level: 1 }).waitFor();
     await page.getByText('No set is on the bench.').waitFor();
     expect(troubles).toEqual([]);

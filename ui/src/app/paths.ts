@@ -20,6 +20,7 @@ export const paths = {
   families: '/families',
   family: (id: string | number) => `/families/${encodeURIComponent(id)}`,
   rules: '/rules',
+  rule: (id: string) => `/rules/${encodeURIComponent(id)}`,
   partsData: '/parts-data',
   people: '/people',
 } as const;

@@ -37,6 +37,7 @@ export const routes: RouteObject[] = [
                   { path: '/families', lazy: () => import('@/routes/families') },
                   { path: '/families/:familyId', lazy: () => import('@/routes/family') },
                   { path: '/rules', lazy: () => import('@/routes/rules') },
+                  { path: '/rules/:ruleId', lazy: () => import('@/routes/rule') },
                   { path: '/parts-data', lazy: () => import('@/routes/parts-data') },
                   { path: '/people', lazy: () => import('@/routes/people') },
                   { path: '*', lazy: () => import('@/routes/not-found') },

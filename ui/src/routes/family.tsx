@@ -5,6 +5,7 @@ import { LoadingState } from '@/components/LoadingState';
 import { PageHeader } from '@/components/PageHeader';
 import { useFamily } from '@/features/families/api/get-family';
 import { FamilyFacts } from '@/features/families/components/FamilyFacts';
+import { PublishedSheet } from '@/features/families/components/PublishedSheet';
 import { SchematicView } from '@/features/schematic/components/SchematicView';
 
 const useStyles = makeStyles({
@@ -15,6 +16,7 @@ const useStyles = makeStyles({
     alignItems: 'start',
     '@media (min-width: 1000px)': { gridTemplateColumns: 'minmax(0, 5fr) minmax(280px, 2fr)' },
   },
+  side: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalXXL, minWidth: 0 },
 });
 
 /** One chassis family: its circuit and what its solved cases found. */
@@ -30,7 +32,10 @@ export function Component() {
       <PageHeader title={family.data.name} hint={family.data.description} />
       <div className={styles.root}>
         <SchematicView netlist={family.data.netlist} height="max(440px, calc(100vh - 240px))" />
-        <FamilyFacts family={family.data} />
+        <div className={styles.side}>
+          <FamilyFacts family={family.data} />
+          <PublishedSheet netlist={family.data.netlist} />
+        </div>
       </div>
     </>
   );

@@ -1,5 +1,6 @@
 import { Field, makeStyles, SearchBox, Text, tokens } from '@fluentui/react-components';
 import { useMemo, useState } from 'react';
+import { paths } from '@/app/paths';
 import { EmptyState } from '@/components/EmptyState';
 import { FailedState } from '@/components/FailedState';
 import { LoadingState } from '@/components/LoadingState';
@@ -81,7 +82,7 @@ export function Component() {
                   <h2 className={styles.pack}>{packInWords(pack)}</h2>
                   <ul className={styles.list}>
                     {members.map((rule) => (
-                      <RuleCard key={rule.id} rule={rule} />
+                      <RuleCard key={rule.id} rule={rule} to={paths.rule(rule.id)} />
                     ))}
                   </ul>
                 </section>

@@ -1,4 +1,5 @@
 import { makeStyles, Text, tokens } from '@fluentui/react-components';
+import { Link } from 'react-router-dom';
 import { StatusBadge } from '@/components/StatusBadge';
 import { type RuleSummary } from '@/lib/api-model';
 
@@ -21,17 +22,32 @@ const useStyles = makeStyles({
   },
   effects: { display: 'flex', flexWrap: 'wrap', gap: tokens.spacingHorizontalXS },
   name: { margin: 0, fontSize: tokens.fontSizeBase400, lineHeight: tokens.lineHeightBase400 },
+  link: {
+    color: tokens.colorBrandForegroundLink,
+    textDecoration: 'none',
+    ':hover': { textDecoration: 'underline' },
+  },
   sentence: { maxWidth: '68ch' },
   quiet: { color: tokens.colorNeutralForeground3, maxWidth: '68ch' },
 });
 
+interface RuleCardProps {
+  rule: RuleSummary;
+  /** Address of the rule in full. */
+  to: string;
+}
+
 /** One rule: what it says, why, and who says so. */
-export function RuleCard({ rule }: { rule: RuleSummary }) {
+export function RuleCard({ rule, to }: RuleCardProps) {
   const styles = useStyles();
   return (
     <li className={styles.card}>
       <div className={styles.top}>
-        <h3 className={styles.name}>{rule.name}</h3>
+        <h3 className={styles.name}>
+          <Link to={to} className={styles.link}>
+            {rule.name}
+          </Link>
+        </h3>
         <span className={styles.effects}>
           {rule.effects.map((effect) => (
             <StatusBadge key={effect} tone={effect === 'caution' ? 'warn' : 'calm'}>
