@@ -24,7 +24,7 @@ describe('an empty shop', () => {
     await page.getByLabel('E-mail address').fill('robin@corner.example');
     await page.getByLabel('Password').fill('short');
     await page.getByRole('button', { name: 'Open the shop' }).click();
-    await page.getByText('at least 10 characters').waitFor();
+    await page.getByText('A password needs at least 10 characters').waitFor();
     expect(await page.getByLabel('Name of the shop').inputValue()).toBe('Corner Radio Service');
     await page.getByLabel('Password').fill('four quiet tubes glow');
     await page.getByRole('button', { name: 'Open the shop' }).click();

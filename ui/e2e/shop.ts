@@ -11,6 +11,9 @@ const PAGE = join(ROOT, 'ui/dist/index.html');
 /** Milliseconds until a start counts as failed; a first start fills the demo shop. */
 const PATIENCE = 90_000;
 
+/** How many roles a demo start prints a sign-in for. */
+const DEMO_ROLES = 4;
+
 /** Roles of the demo shop's people. */
 export type DemoRole = 'trainee' | 'technician' | 'senior' | 'owner';
 
@@ -69,8 +72,9 @@ export async function startShop(seed: 'demo' | 'none' = 'demo'): Promise<Shop> {
     const listen = (piece: Buffer) => {
       output += piece.toString();
       const url = /Ohmstead is ready at (\S+)/.exec(output)?.[1];
-      // The sign-ins follow in the same breath; the last role ends the list.
-      if (!url || (seed === 'demo' && !/^ {2}owner\s.*\n/m.test(output))) return;
+      // The sign-ins follow line by line, and a piece may end in the middle of them.
+      const isComplete = seed === 'none' || Object.keys(signInsOf(output)).length === DEMO_ROLES;
+      if (!url || !isComplete) return;
       clearTimeout(timer);
       resolve(url);
     };
@@ -93,7 +97,7 @@ export async function startShop(seed: 'demo' | 'none' = 'demo'): Promise<Shop> {
 /** Reads the lines "  role  e-mail  password" of a demo start. */
 function signInsOf(output: string): Shop['people'] {
   const people: Shop['people'] = {};
-  const lines = output.matchAll(/^ {2}(trainee|technician|senior|owner)\s+(\S+@\S+)\s+(\S.*)$/gm);
+  const lines = output.matchAll(/^ {2}(trainee|technician|senior|owner)\s+(\S+@\S+)\s+(\S.*)\n/gm);
   for (const [, role, email, password] of lines) {
     people[role as DemoRole] = { email, password: password.trim() };
   }

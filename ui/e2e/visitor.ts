@@ -47,6 +47,16 @@ export interface Expected {
   status: number;
 }
 
+interface VisitOptions {
+  screen?: ScreenName;
+  /** The person asked their device for dark pages. */
+  isDark?: boolean;
+  /** Refusals that belong to the journey. */
+  expected?: Expected[];
+  /** Cookies and storage of an earlier visit. */
+  kept?: Awaited<ReturnType<BrowserContext['storageState']>>;
+}
+
 /** Asking who is signed in is refused while nobody is; every first visit does it. */
 const NOBODY_YET: Expected = { method: 'POST', path: /^\/api\/auth\/refresh$/, status: 401 };
 
@@ -55,16 +65,16 @@ const NOBODY_YET: Expected = { method: 'POST', path: /^\/api\/auth\/refresh$/, s
  *
  * @param browser where it opens.
  * @param url address that relative paths count from.
- * @param options screen, whether the person asked for a dark page, and refusals that belong to the journey.
  */
 export async function visit(
   browser: Browser,
   url: string,
-  options: { screen?: ScreenName; isDark?: boolean; expected?: Expected[] } = {},
+  options: VisitOptions = {},
 ): Promise<Visitor> {
-  const { screen = 'desktop', isDark = false, expected = [] } = options;
+  const { screen = 'desktop', isDark = false, expected = [], kept } = options;
   const context = await browser.newContext({
     baseURL: url,
+    storageState: kept,
     viewport: SCREENS[screen],
     hasTouch: screen === 'phone',
     colorScheme: isDark ? 'dark' : 'light',
