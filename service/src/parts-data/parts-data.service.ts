@@ -56,6 +56,10 @@ export class PartsDataService implements OnModuleInit {
         `${type} ${String(details.role ?? '')} ${String(details.base ?? '')}`.toLowerCase();
       return words.every((word) => text.includes(word));
     });
+    // What begins with the words comes first: 47 before 1847.
+    const begins = ({ type }: PartType) =>
+      words.length > 0 && type.toLowerCase().startsWith(words[0]) ? 0 : 1;
+    kept.sort((x, y) => begins(x) - begins(y));
     return { total: kept.length, items: kept.slice(offset, offset + limit).map(present) };
   }
 

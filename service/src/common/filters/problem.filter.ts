@@ -30,7 +30,10 @@ function fromEngine(error: EngineError): Told {
 
 /** Sentences for what Nest and Express refuse by themselves. */
 const PLAIN: Record<number, [string, string]> = {
-  400: ['bad-request', 'The request could not be understood. Check what was sent.'],
+  400: [
+    'bad-request',
+    'The request could not be understood: it is not valid JSON, or a number in its address is none.',
+  ],
   401: ['not-signed-in', 'Sign in to go on.'],
   403: ['not-allowed', 'Your role does not allow this. Ask a senior technician or the owner.'],
   404: ['not-found', 'There is nothing at this address.'],
@@ -62,9 +65,6 @@ function tell(error: unknown): Told {
       code: 'still-used',
       detail: 'Something else still refers to this, or what it refers to is gone. Reload the page.',
     };
-  }
-  if (isBodyError(error) && error.type === 'entity.parse.failed') {
-    return { status: 400, code: 'not-json', detail: 'The request is not valid JSON.' };
   }
   const status =
     error instanceof HttpException ? error.getStatus() : isBodyError(error) ? error.status : 500;

@@ -8,9 +8,25 @@ import { EngineError } from '../errors';
 interface WithEquations {
   solveEquations(equations: string[], unknowns: string[]): [string, number | object][];
   flush(): unknown;
+  getCore(): { Settings: { PARSE2NUMBER: boolean } };
 }
 
 const library = nerdamer as unknown as WithEquations;
+
+/**
+ * Runs one use of the library from a clean state and leaves it clean. It keeps every expression it
+ * has seen, and solving for a symbol leaves it in a mode that rounds fractions to eight digits.
+ */
+function cleanly<T>(use: () => T): T {
+  const { Settings } = library.getCore();
+  Settings.PARSE2NUMBER = false;
+  try {
+    return use();
+  } finally {
+    Settings.PARSE2NUMBER = false;
+    library.flush();
+  }
+}
 
 /** Significant digits of a coefficient. Short whole numbers keep the library's fractions quick. */
 const DIGITS = 12;
@@ -46,30 +62,30 @@ export interface NodalRow {
  * @throws EngineError `no-distinct-solution` when there is none.
  */
 export function solveRows(rows: readonly NodalRow[]): Float64Array {
-  const n = rows.length;
   const whole = rows.map(wholeRow);
   try {
-    if (n === 1) {
-      const [coefficient, constant] = whole[0];
-      return checked(
-        Float64Array.of(ratioOf(nerdamer(`(${constant})/(${coefficient})`).toString())),
-      );
-    }
-    const names = rows.map((_, i) => unknownName(i));
-    const equations = whole.map((row) => {
-      const terms = row
-        .slice(0, n)
-        .map((value, i) => (value === 0n ? '' : `(${value})*${names[i]}`))
-        .filter((term) => term !== '');
-      return `${terms.join('+')}=${row[n]}`;
-    });
-    const answer = new Map(library.solveEquations(equations, names));
-    return checked(Float64Array.from(names, (name) => Number(answer.get(name))));
+    return cleanly(() => solveWhole(whole));
   } catch (error) {
     throw error instanceof EngineError ? error : noSolution();
-  } finally {
-    library.flush();
   }
+}
+
+function solveWhole(whole: readonly bigint[][]): Float64Array {
+  const n = whole.length;
+  if (n === 1) {
+    const [coefficient, constant] = whole[0];
+    return checked(Float64Array.of(ratioOf(nerdamer(`(${constant})/(${coefficient})`).toString())));
+  }
+  const names = whole.map((_, i) => unknownName(i));
+  const equations = whole.map((row) => {
+    const terms = row
+      .slice(0, n)
+      .map((value, i) => (value === 0n ? '' : `(${value})*${names[i]}`))
+      .filter((term) => term !== '');
+    return `${terms.join('+')}=${row[n]}`;
+  });
+  const answer = new Map(library.solveEquations(equations, names));
+  return checked(Float64Array.from(names, (name) => Number(answer.get(name))));
 }
 
 /** Value of a reduced fraction such as `3/8`. */
@@ -80,42 +96,40 @@ function ratioOf(text: string): number {
 
 /** An expression in the symbol: one unknown of a small system solved with the symbol in it. */
 export function solveWithSymbol(equations: string[], unknowns: string[], wanted: string): string {
-  try {
+  return cleanly(() => {
     const answer = new Map(library.solveEquations(equations, unknowns));
     const expression = String(answer.get(wanted));
+    // It has been seen to hand unknowns back instead of refusing.
     if (unknowns.some((name) => expression.includes(name))) throw noSolution();
     return expression;
-  } finally {
-    library.flush();
-  }
+  });
 }
 
 /** Value of an expression for one value of the symbol. */
 export function evaluateAt(expression: string, value: number): number {
-  try {
-    const text = nerdamer(expression, { [SYMBOL]: exactly(value) })
-      .evaluate()
-      .text('decimals');
-    return Number(text);
-  } finally {
-    library.flush();
-  }
+  return cleanly(() =>
+    Number(
+      nerdamer(expression, { [SYMBOL]: exactly(value) })
+        .evaluate()
+        .text('decimals'),
+    ),
+  );
 }
 
-/** Values of the symbol for which an expression takes a value. */
+/** Values of the symbol for which an expression takes a value; none when there are none. */
 export function solveForSymbol(expression: string, value: number): number[] {
-  try {
-    const found = nerdamer(`${expression}=${exactly(value)}`).solveFor(SYMBOL) as unknown;
-    return [found]
-      .flat()
-      .map((root) => Number(nerdamer(String(root)).evaluate().text('decimals')))
-      .filter(Number.isFinite);
-  } catch {
-    // The library throws where there is nothing to solve for.
-    return [];
-  } finally {
-    library.flush();
-  }
+  return cleanly(() => {
+    try {
+      const found = nerdamer(`${expression}=${exactly(value)}`).solveFor(SYMBOL) as unknown;
+      return [found]
+        .flat()
+        .map((root) => Number(nerdamer(String(root)).evaluate().text('decimals')))
+        .filter(Number.isFinite);
+    } catch {
+      // The library throws where there is nothing to solve for.
+      return [];
+    }
+  });
 }
 
 /**
@@ -134,7 +148,9 @@ export function exactly(value: number): string {
 function wholeRow({ place, own, others, constant }: NodalRow): bigint[] {
   const powers = own.filter((value) => value > 0).map((value) => Math.floor(Math.log10(value)));
   if (powers.length === 0) throw noSolution();
-  const places = Math.min(DIGITS - 1 - Math.min(...powers), MOST_DIGITS - Math.max(...powers));
+  const most = Math.max(...powers);
+  if (constant !== 0) powers.push(Math.floor(Math.log10(Math.abs(constant))));
+  const places = Math.min(DIGITS - 1 - Math.min(...powers), MOST_DIGITS - most);
   const row = Array.from(others, (value) => -wholeOf(value, places));
   row[place] = own.reduce((sum, value) => sum + wholeOf(value, places), 0n);
   return [...row, wholeOf(constant, places)];

@@ -5,7 +5,7 @@ import { type Netlist, type NetlistProblem, PART_KINDS, type PartKind } from './
 /** Largest circuit that is taken. */
 export const MOST_PARTS = 400;
 const REF = /^[A-Za-z0-9_-]{1,24}$/;
-const NODE = /^[^\s\u0000-\u001f]{1,40}$/;
+const NODE = /^\S{1,40}$/;
 const TOP = ['ohmstead', 'title', 'reference', 'line', 'parts', 'points', 'layout', '$schema'];
 const LINE = ['hot', 'return', 'volts', 'hertz', 'ohms'];
 const PUBLISHED = ['acVolts', 'dcVolts', 'rippleVolts', 'ohms'];

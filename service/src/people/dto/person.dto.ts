@@ -32,7 +32,7 @@ export function presentPerson(person: Person, asker: Actor = person): PersonDto 
     email,
     role,
     isBlocked,
-    isInvited: person.passwordHash === null,
+    isInvited: !person.passwordHash,
     abilities: {
       managePeople: canListPeople(person) && canInvite(person),
       writeFamilies: isAtLeast(person, 'senior'),
