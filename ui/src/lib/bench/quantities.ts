@@ -17,6 +17,25 @@ export function takenInWords(value: number | 'OL' | null | undefined, take: Take
   return formatQuantity(value, unit, 4);
 }
 
+/** Below this a computed value is nothing: volts or amps that no bench meter would show. */
+const NOTHING = { V: 0.005, A: 5e-7, Ω: 0 };
+
+/**
+ * Writes a computed value with its unit, to the three figures that tolerances leave.
+ *
+ * @param value SI value, null for over range.
+ * @param take kind of reading, which gives the unit.
+ * @returns "96.2 V", "0 V" for what is too little for a meter, "OL" for null.
+ */
+export function computedInWords(value: number | null, take: Take): string {
+  if (value === null) return 'OL';
+  const unit = TAKE_WORDS[take].unit as keyof typeof NOTHING | null;
+  if (!unit) return '–';
+  // Above a hundred a meter shows tenths, and the difference of two such values matters.
+  const digits = Math.abs(value) >= 100 ? 4 : 3;
+  return formatQuantity(Math.abs(value) < NOTHING[unit] ? 0 : value, unit, digits);
+}
+
 /**
  * Writes the two ends of an interval.
  *
@@ -25,9 +44,11 @@ export function takenInWords(value: number | 'OL' | null | undefined, take: Take
 export function intervalInWords(low: number, high: number, take: Take): string {
   const { unit } = TAKE_WORDS[take];
   if (!unit) return '–';
-  const [from, to] = [formatQuantity(low, unit, 3), formatQuantity(high, unit, 3)];
+  const [from, to] = [computedInWords(low, take), computedInWords(high, take)];
   const [number, word] = from.split(' ');
-  return to.endsWith(` ${word}`) || low === 0 ? `${number} to ${to}` : `${from} to ${to}`;
+  return to.endsWith(` ${word}`) || from.startsWith('0 ')
+    ? `${number} to ${to}`
+    : `${from} to ${to}`;
 }
 
 /** Writes what was read: a value with its unit, or what was seen. */

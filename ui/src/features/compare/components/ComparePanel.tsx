@@ -45,7 +45,7 @@ const useStyles = makeStyles({
 
 /** Measured against computed: a plot down the string, and the same values as a table. */
 export function ComparePanel(props: ComparePanelProps) {
-  const { caseId, readings, caseVersion, onShowWorking } = props;
+  const { caseId, netlist, readings, caseVersion, onShowWorking } = props;
   const styles = useStyles();
   const compare = useCompare(caseId, `${caseVersion ?? ''}:${revisionOfReadings(readings)}`);
   const [chosen, setChosen] = useState<Take>();
@@ -55,11 +55,11 @@ export function ComparePanel(props: ComparePanelProps) {
   const all = compare.data?.points ?? [];
   const takes = takesOf(all);
   const take = chosen && takes.includes(chosen) ? chosen : takes[0];
-  const points = take ? pointsOf(all, take) : [];
+  const points = take ? pointsOf(all, take, netlist) : [];
   const drawn = plottedOf(points);
   const longest = Math.max(4, ...drawn.map(({ label }) => label.length)) * 7.2 + 16;
   const left = Math.min(longest, Math.max(84, width * 0.36));
-  const plot = plotOf(drawn, Math.max(280, width), left);
+  const plot = plotOf(drawn, netlist, Math.max(280, width), left);
 
   if (compare.isPending) return <LoadingState label="Computing the healthy set" />;
   if (compare.isError && !compare.data) {

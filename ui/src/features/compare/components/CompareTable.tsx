@@ -1,6 +1,6 @@
 import { type Take } from '@engine/netlist/types';
 import { Button, makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
-import { intervalInWords, takenInWords } from '@/lib/bench/quantities';
+import { computedInWords, intervalInWords, takenInWords } from '@/lib/bench/quantities';
 import { TAKE_WORDS } from '@/lib/bench/takes';
 import { type ComparePoint } from '@engine/diagnosis-types';
 import { deviationPhrase, verdictOf } from '../plot/compare-model';
@@ -90,9 +90,7 @@ export function CompareTable({ points, take, onShowWorking }: CompareTableProps)
                 <td className={mergeClasses(styles.cell, styles.measured)}>
                   {takenInWords(point.measured, take)}
                 </td>
-                <td className={styles.cell}>
-                  {point.value === null ? 'OL' : takenInWords(point.value, take)}
-                </td>
+                <td className={styles.cell}>{computedInWords(point.value, take)}</td>
                 <td className={mergeClasses(styles.cell, styles.quiet)}>
                   {point.low === null || point.high === null
                     ? '–'

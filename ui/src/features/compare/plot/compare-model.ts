@@ -1,6 +1,6 @@
-import { type Take } from '@engine/netlist/types';
+import { type Netlist, type Take } from '@engine/netlist/types';
 import { deviationInWords } from '@/lib/bench/chance';
-import { takenInWords } from '@/lib/bench/quantities';
+import { computedInWords, takenInWords } from '@/lib/bench/quantities';
 import { type ComparePoint } from '@engine/diagnosis-types';
 
 /** How far a reading lies off, for its mark; never said by colour alone. */
@@ -17,11 +17,31 @@ export function takesOf(points: readonly ComparePoint[]): Take[] {
   return ORDER.filter((take) => points.some((point) => point.take === take));
 }
 
-/** Points of one kind of reading, down the string; parts after points. */
-export function pointsOf(points: readonly ComparePoint[], take: Take): ComparePoint[] {
+/**
+ * Orders the points of one kind of reading: the line first, down the string, then readings between two
+ * other nodes, then parts.
+ *
+ * @param netlist says which node is the line and which the reference.
+ */
+export function pointsOf(
+  points: readonly ComparePoint[],
+  take: Take,
+  netlist: Pick<Netlist, 'line' | 'reference'>,
+): ComparePoint[] {
+  const rank = (point: ComparePoint) => {
+    if (point.kind === 'part' || point.part) return 3;
+    if (!isAlong(point, netlist)) return 2;
+    return point.at?.[0] === netlist.line?.hot ? 0 : 1;
+  };
   return points
     .filter((point) => point.take === take)
-    .sort((a, b) => Number(a.kind === 'part') - Number(b.kind === 'part') || a.order - b.order);
+    .map((point) => (rank(point) === 0 ? { ...point, label: 'The line' } : point))
+    .sort((a, b) => rank(a) - rank(b) || a.order - b.order);
+}
+
+/** True for a reading against the reference, which has its place down the string. */
+export function isAlong(point: ComparePoint, netlist: Pick<Netlist, 'reference'>): boolean {
+  return point.kind === 'point' && point.at?.[1] === netlist.reference;
 }
 
 /**
@@ -58,7 +78,7 @@ export function verdictOf(point: ComparePoint): Verdict | null {
  */
 export function comparisonInWords(point: ComparePoint): string {
   const { measured, value, take } = point;
-  const computed = value === null ? 'OL' : takenInWords(value, take);
+  const computed = computedInWords(value, take);
   if (measured === undefined || measured === null) return `Not measured yet, ${computed} computed.`;
   const said = `${takenInWords(measured, take)} measured, ${computed} computed`;
   return `${said}: ${deviationPhrase(point)}.`;

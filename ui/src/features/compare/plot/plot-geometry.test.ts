@@ -10,6 +10,11 @@ import {
 } from './compare-model';
 import { plotOf } from './plot-geometry';
 
+const circuit = {
+  reference: 'CHASSIS',
+  line: { hot: 'L', return: 'CHASSIS', volts: 117, hertz: 60 },
+};
+
 function point(overrides: Partial<ComparePoint>): ComparePoint {
   return {
     kind: 'point',
@@ -32,7 +37,17 @@ describe('comparing', () => {
 
   it('orders points down the string, parts after them', () => {
     const points = [point({ order: 3 }), point({ kind: 'part', order: 1 }), point({ order: 2 })];
-    expect(pointsOf(points, 'ac-volts').map(({ order }) => order)).toEqual([2, 3, 1]);
+    expect(pointsOf(points, 'ac-volts', circuit).map(({ order }) => order)).toEqual([2, 3, 1]);
+  });
+
+  it('begins with the line and leaves readings between other nodes for after the string', () => {
+    const points = [
+      point({ order: 1, at: ['B3', 'B4'], label: 'between' }),
+      point({ order: 2, label: 'down' }),
+      point({ order: 9, at: ['L', 'CHASSIS'], label: 'L to CHASSIS' }),
+    ];
+    const labels = pointsOf(points, 'ac-volts', circuit).map(({ label }) => label);
+    expect(labels).toEqual(['The line', 'down', 'between']);
   });
 
   it('draws parts only where they were measured', () => {
@@ -65,7 +80,7 @@ describe('the plot down the string', () => {
     point({ value: null, low: null, high: null }),
     point({ value: 12, low: 11, high: 13, measured: 'OL' }),
   ];
-  const plot = plotOf(points, 600, 120);
+  const plot = plotOf(points, circuit, 600, 120);
 
   it('stands everything inside its frame, one row below the other', () => {
     for (const { low, high, computed, measured, published } of plot.rows) {
@@ -88,7 +103,12 @@ describe('the plot down the string', () => {
 
   it('compresses the scale where values lie decades apart', () => {
     expect(plot.isCompressed).toBe(false);
-    const wide = plotOf([...points, point({ value: 60_000, low: 5e4, high: 7e4 })], 600, 120);
+    const wide = plotOf(
+      [...points, point({ value: 60_000, low: 5e4, high: 7e4 })],
+      circuit,
+      600,
+      120,
+    );
     expect(wide.isCompressed).toBe(true);
     expect(wide.rows[3].computed!).toBeGreaterThan(125);
   });

@@ -1,7 +1,8 @@
 import { scaleLinear, scaleSymlog } from 'd3-scale';
 import { area, line } from 'd3-shape';
 import { type ComparePoint } from '@engine/diagnosis-types';
-import { type Verdict, verdictOf } from './compare-model';
+import { type Netlist } from '@engine/netlist/types';
+import { isAlong, type Verdict, verdictOf } from './compare-model';
 
 /** Height of one row of the plot, px; also a target that a thumb meets. */
 export const ROW_HEIGHT = 44;
@@ -41,10 +42,16 @@ export interface Plot {
  * Values that spread over more than two decades are drawn on a compressed scale, linear near zero.
  *
  * @param points of one kind of reading, in order.
+ * @param netlist says what the string's readings are against.
  * @param width px, at least 200.
  * @param left px kept for labels.
  */
-export function plotOf(points: readonly ComparePoint[], width: number, left: number): Plot {
+export function plotOf(
+  points: readonly ComparePoint[],
+  netlist: Pick<Netlist, 'reference'>,
+  width: number,
+  left: number,
+): Plot {
   const height = TOP + points.length * ROW_HEIGHT + BOTTOM;
   const values = points.flatMap(({ value, low, high, published, measured }) =>
     [value, low, high, published, measured].filter((one) => typeof one === 'number'),
@@ -77,7 +84,7 @@ export function plotOf(points: readonly ComparePoint[], width: number, left: num
       verdict: verdictOf(point),
     };
   });
-  const runs = runsOf(rows);
+  const runs = runsOf(rows, netlist);
   const band = area<PlotRow>()
     .x0((row) => row.low ?? row.computed!)
     .x1((row) => row.high ?? row.computed!)
@@ -104,13 +111,13 @@ function ticksOf(scale: { ticks: (count: number) => number[] }, width: number): 
   return ticks.filter((_, index) => index % step === 0);
 }
 
-/** Rows next to each other that have a computed value; parts are not joined: no wire runs through them. */
-function runsOf(rows: readonly PlotRow[]): PlotRow[][] {
+/** Rows along the string that have a computed value; others stand alone: no wire runs through them. */
+function runsOf(rows: readonly PlotRow[], netlist: Pick<Netlist, 'reference'>): PlotRow[][] {
   const runs: PlotRow[][] = [];
   let run: PlotRow[] = [];
   for (const row of rows) {
-    const isPart = row.point.kind === 'part';
-    if (row.computed === null || isPart) {
+    const isJoined = isAlong(row.point, netlist);
+    if (row.computed === null || !isJoined) {
       if (run.length > 0) runs.push(run);
       run = [];
       if (row.computed !== null) runs.push([row]);

@@ -93,15 +93,11 @@ export function BenchEntry(props: BenchEntryProps) {
         />
       </div>
       <div>
-        <Text className={styles.state}>
-          {suggested ? 'Suggested next' : isPoweredReading(place.take) ? 'Powered' : 'Power off'}
+        <Text size={200} className={styles.state}>
+          {suggested ? 'Suggested next, ' : ''}
+          {isPoweredReading(place.take) ? 'with the set powered' : 'with the power off'}
         </Text>
         <h3 className={styles.title}>{capital(labelForReading(netlist, place))}</h3>
-        {suggested && (
-          <Text className={styles.state}>
-            {isPoweredReading(place.take) ? 'With the set powered.' : 'With the power off.'}
-          </Text>
-        )}
       </div>
       <LeadSketch netlist={netlist} place={place} />
       {isLocked ? (

@@ -19,12 +19,12 @@ const useStyles = makeStyles({
   key: {
     minWidth: 0,
     maxWidth: 'none',
-    minHeight: '56px',
+    minHeight: '48px',
     fontSize: tokens.fontSizeBase500,
     fontVariantNumeric: 'tabular-nums',
   },
   side: { fontSize: tokens.fontSizeBase400 },
-  enter: { gridColumnEnd: 'span 4', minHeight: '60px' },
+  enter: { gridColumnEnd: 'span 4', minHeight: '52px' },
 });
 
 const DIGITS = ['7', '8', '9', '4', '5', '6', '1', '2', '3'];

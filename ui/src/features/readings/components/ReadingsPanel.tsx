@@ -101,30 +101,33 @@ export function ReadingsPanel(props: ReadingsPanelProps) {
     return <FailedState error={query.error} onRetry={() => void query.refetch()} />;
   }
   const next = nextReadings[0];
+  const bar = (
+    <div className={styles.bar}>
+      <MeterPicker meterId={meterId} onChoose={setMeterId} />
+      <Button
+        icon={<ArrowUndoRegular />}
+        disabled={!entry.canUndo}
+        className={styles.touch}
+        onClick={undo}
+      >
+        Undo
+      </Button>
+      <Button
+        icon={isBench ? <TableRegular /> : <CalculatorRegular />}
+        className={styles.touch}
+        onClick={() => setMode(isBench ? 'grid' : 'bench')}
+      >
+        {isBench ? 'All readings' : 'One at a time'}
+      </Button>
+      <SendStatus state={sendState} />
+    </div>
+  );
   return (
     <div className={styles.root} ref={root}>
       {next && canRecord && !isBench && (
         <NextReadingNote netlist={netlist} next={next} onGo={() => jumpTo(next)} />
       )}
-      <div className={styles.bar}>
-        <MeterPicker meterId={meterId} onChoose={setMeterId} />
-        <Button
-          icon={<ArrowUndoRegular />}
-          disabled={!entry.canUndo}
-          className={styles.touch}
-          onClick={undo}
-        >
-          Undo
-        </Button>
-        <Button
-          icon={isBench ? <TableRegular /> : <CalculatorRegular />}
-          className={styles.touch}
-          onClick={() => setMode(isBench ? 'grid' : 'bench')}
-        >
-          {isBench ? 'All readings' : 'One at a time'}
-        </Button>
-        <SendStatus state={sendState} />
-      </div>
+      {!isBench && bar}
       {left > 0 && (
         <Text role="status" size={200}>
           {left === 1 ? 'One pasted value' : `${left} pasted values`} found no place in the grid.
@@ -165,6 +168,7 @@ export function ReadingsPanel(props: ReadingsPanelProps) {
           );
         })
       )}
+      {isBench && bar}
       {!isBench && canRecord && (
         <AddLeads
           netlist={netlist}

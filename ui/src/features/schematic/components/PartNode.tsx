@@ -42,11 +42,11 @@ const useStyles = makeStyles({
   missing: { opacity: 0.35, strokeDasharray: '4 3' },
   selected: { fill: tokens.colorBrandBackground2, stroke: tokens.colorBrandStroke1 },
   suspect: { fill: 'none', stroke: tokens.colorStatusDangerBorder2 },
-  weak: { strokeDasharray: '2 4', stroke: tokens.colorStatusWarningBorder2 },
+  weak: { strokeDasharray: '2 4', stroke: tokens.colorStatusWarningForeground1 },
   badge: { fill: tokens.colorStatusDangerBackground3 },
   badgeWeak: {
     fill: tokens.colorStatusWarningBackground1,
-    stroke: tokens.colorStatusWarningBorder2,
+    stroke: tokens.colorStatusWarningForeground1,
   },
   badgeText: {
     fontSize: '11px',

@@ -22,7 +22,7 @@ const useStyles = makeStyles({
   measured: { fill: tokens.colorBrandForeground1 },
   computed: { fill: 'none', stroke: tokens.colorNeutralForeground2 },
   strong: { fill: 'none', stroke: tokens.colorStatusDangerBorder2 },
-  weak: { fill: 'none', stroke: tokens.colorStatusWarningBorder2 },
+  weak: { fill: 'none', stroke: tokens.colorStatusWarningForeground1 },
   difference: { fill: 'none', stroke: tokens.colorBrandForeground1 },
 });
 

@@ -82,7 +82,7 @@ export const SheetNode = memo(function SheetNode({ data }: NodeProps<SheetNodeDa
         ))}
       </g>
       {drawing.rails.map((rail, index) => (
-        <RailName key={index} rail={rail} />
+        <RailName key={index} rail={rail} netlist={netlist} />
       ))}
       {netlist.line &&
         drawing.sources.map(({ label }, index) => (
@@ -141,7 +141,7 @@ function NodeLabel({
           className={mergeClasses(styles.point, isJunction && styles.junction)}
         />
       )}
-      {(isPoint || hasValues) && (
+      {(isPoint || hasValues) && node.node !== netlist.line?.hot && (
         <text x={xOf(node.label)} y={top} className={styles.name}>
           {label}
         </text>
@@ -196,7 +196,7 @@ function Value({
   );
 }
 
-function RailName({ rail }: { rail: RailSymbol }) {
+function RailName({ rail, netlist }: { rail: RailSymbol; netlist: Netlist }) {
   const styles = useStyles();
   if (!rail.isNamed) return null;
   const { x, y, width, height } = rail.box;
@@ -207,7 +207,7 @@ function RailName({ rail }: { rail: RailSymbol }) {
   const anchor = isBelow ? 'middle' : rail.side === 'left' ? 'start' : 'end';
   return (
     <text {...spot} textAnchor={anchor} className={styles.name}>
-      {rail.node}
+      {labelForNode({ ...netlist, line: undefined }, rail.node)}
     </text>
   );
 }

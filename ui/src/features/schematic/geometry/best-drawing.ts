@@ -58,7 +58,8 @@ export function firstView(extent: Box, room: { width: number; height: number }):
   if (whole.zoom >= LEGIBLE) return whole;
   const zoom = Math.min(1, Math.max(LEGIBLE, room.width / extent.width));
   const spare = Math.max(0, room.width - extent.width * zoom) / 2;
-  return { x: spare - extent.x * zoom, y: -extent.y * zoom, zoom };
+  const above = Math.max(0, room.height - extent.height * zoom) / 2;
+  return { x: spare - extent.x * zoom, y: above - extent.y * zoom, zoom };
 }
 
 /** The whole drawing in the middle of the room. */

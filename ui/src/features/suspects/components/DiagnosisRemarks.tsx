@@ -23,6 +23,8 @@ interface DiagnosisRemarksProps {
 
 const useStyles = makeStyles({
   root: { display: 'flex', flexDirection: 'column', gap: tokens.spacingVerticalS },
+  summary: { cursor: 'pointer', fontWeight: tokens.fontWeightSemibold },
+  list: { margin: `${tokens.spacingVerticalXS} 0 0`, paddingLeft: tokens.spacingHorizontalL },
   button: { '@media (pointer: coarse)': { minHeight: '44px' } },
 });
 
@@ -33,14 +35,25 @@ export function DiagnosisRemarks(props: DiagnosisRemarksProps) {
   const again = result.retake.flatMap((index) => readings[index] ?? []);
   const cautions = result.advice.filter(({ effect }) => effect === 'caution');
   const bars = [
-    ...cautions.map(({ rule, text, because }) => (
-      <MessageBar key={rule} intent="warning" layout="multiline">
+    cautions.length > 0 && (
+      <MessageBar key="cautions" intent="warning" layout="multiline">
         <MessageBarBody>
-          <MessageBarTitle>Caution</MessageBarTitle>
-          {text} {because}
+          <details>
+            <summary className={styles.summary}>
+              {cautions.length === 1 ? 'A caution applies' : `${cautions.length} cautions apply`} to
+              this set.
+            </summary>
+            <ul className={styles.list}>
+              {cautions.map(({ rule, text, because }) => (
+                <li key={rule}>
+                  {text} {because}
+                </li>
+              ))}
+            </ul>
+          </details>
         </MessageBarBody>
       </MessageBar>
-    )),
+    ),
     result.noneOfThese && (
       <MessageBar key="none" intent="warning" layout="multiline">
         <MessageBarBody>

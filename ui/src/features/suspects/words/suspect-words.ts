@@ -2,7 +2,7 @@ import { type NextReading, type ReadingEvidence, type Suspect } from '@engine/di
 import { formatQuantity } from '@engine/units';
 import { type CaseReading } from '@/lib/bench/case-reading';
 import { timesInWords } from '@/lib/bench/chance';
-import { intervalInWords, takenInWords } from '@/lib/bench/quantities';
+import { computedInWords, intervalInWords } from '@/lib/bench/quantities';
 
 /** Suspects side by side that the readings so far cannot tell apart. */
 export interface SuspectGroup {
@@ -12,7 +12,7 @@ export interface SuspectGroup {
 }
 
 /** Below this a suspect is only listed when asked for. */
-export const SHOWN_FROM = 0.005;
+export const SHOWN_FROM = 0.02;
 
 /**
  * Puts suspects of one group together, in the order of the likeliest of each group.
@@ -97,8 +97,8 @@ export function wouldShowInWords(
   evidence: ReadingEvidence,
   reading: Pick<CaseReading, 'take'>,
 ): string {
-  if (evidence.predicted === null) return 'OL';
-  const centre = takenInWords(evidence.predicted, reading.take);
+  const centre = computedInWords(evidence.predicted, reading.take);
+  if (evidence.predicted === null) return centre;
   if (evidence.low === undefined || evidence.high === undefined) return centre;
   return `${centre} (${intervalInWords(evidence.low, evidence.high, reading.take)})`;
 }
