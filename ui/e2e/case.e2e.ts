@@ -4,16 +4,12 @@ import { barriers, overhang } from './axe';
 import { type Shop, startShop } from './shop';
 import { type ScreenName, signIn, startBrowser, visit } from './visitor';
 
-let shop: Shop;
 let browser: Browser;
 
 beforeAll(async () => {
-  [shop, browser] = await Promise.all([startShop(), startBrowser()]);
+  browser = await startBrowser();
 });
-afterAll(async () => {
-  await browser?.close();
-  await shop?.stop();
-});
+afterAll(() => browser?.close());
 
 /** Opens the console television whose dropper has an open section. */
 async function openConsole(page: Page): Promise<void> {
@@ -36,15 +32,6 @@ async function nextPlaces(page: Page): Promise<string> {
   return next.innerText();
 }
 
-/** Waits until the diagnosis has caught up with this many readings. */
-async function settle(page: Page, count: string): Promise<void> {
-  await page
-    .getByText(
-      new RegExp(`^(From ${count} readings\\.|The first suspect needs no further reading)`),
-    )
-    .waitFor();
-}
-
 /** Types one reading on the wide grid. */
 async function typeReading(page: Page, label: RegExp, value: string): Promise<void> {
   const cell = page.getByRole('textbox', { name: label });
@@ -62,6 +49,13 @@ async function padReading(page: Page, choice: RegExp, keys: string[]): Promise<v
 }
 
 describe.each<ScreenName>(['desktop', 'phone'])('the console television on a %s', (screen) => {
+  // A shop for each screen: readings that one journey entered would lead the other.
+  let shop: Shop;
+  beforeAll(async () => {
+    shop = await startShop();
+  });
+  afterAll(() => shop?.stop());
+
   test('a technician enters three readings and the open section stands first', async () => {
     const { page, troubles, leave, picture } = await visit(browser, shop.url, { screen });
     try {
