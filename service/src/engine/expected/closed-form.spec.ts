@@ -79,21 +79,19 @@ describe('closedFormOf', () => {
   });
 
   // Source: the part set to the implied value and the network solved by an outside library.
-  it.each([3, 6, 10, 15])('brings the reading back in a ladder of %p nodes', (nodes) => {
-    for (let seed = 1; seed <= 2; seed += 1) {
-      const system = randomLadder(nodes, seed);
-      const target = { a: `H${nodes}`, b: 'N' };
-      const wanted = { ...system, conductances: system.conductances.slice() };
-      wanted.conductances[1] = {
-        ...system.conductances[1],
-        siemens: system.conductances[1].siemens / 3.7,
-      };
-      const { names, g, i } = matrixOf(wanted);
-      const volts = new LuDecomposition(new Matrix(g)).solve(Matrix.columnVector(i));
-      const measured = volts.get(names.indexOf(target.a), 0);
-      const form = closedFormOf(system, 'R2', target, measured);
-      expect(form.impliedValue! / (3.7 / system.conductances[1].siemens)).toBeCloseTo(1, 6);
-    }
+  it.each([3, 6, 12])('brings the reading back in a ladder of %p nodes', (nodes) => {
+    const system = randomLadder(nodes, 4);
+    const target = { a: `H${nodes}`, b: 'N' };
+    const wanted = { ...system, conductances: system.conductances.slice() };
+    wanted.conductances[1] = {
+      ...system.conductances[1],
+      siemens: system.conductances[1].siemens / 3.7,
+    };
+    const { names, g, i } = matrixOf(wanted);
+    const volts = new LuDecomposition(new Matrix(g)).solve(Matrix.columnVector(i));
+    const measured = volts.get(names.indexOf(target.a), 0);
+    const form = closedFormOf(system, 'R2', target, measured);
+    expect(form.impliedValue! / (3.7 / system.conductances[1].siemens)).toBeCloseTo(1, 6);
   });
 
   it('finds a joint of 0.05 Ω gone high in a string of hundreds of ohms', () => {

@@ -18,6 +18,8 @@ import type { ClosedFormAnswer, NodalConductance, NodalSystem } from './types';
 const AGREEMENT = 1e-6;
 /** Below this share of the reading's scale a part has no influence on it. */
 const NO_INFLUENCE = 1e-10;
+/** Beyond this a part is open, and a value means nothing. */
+const MOST_IMPLIED = 1e11;
 /** Largest stand-in for a part when the rest of the network is looked at from its ends. */
 const MOST_OHMS = 1e10;
 
@@ -78,6 +80,12 @@ export function closedFormOf(
   const volts = formatQuantity(measured, 'V', 4);
   if (implied === undefined) {
     return answer(null, `No resistance of ${part} alone brings this reading to ${volts}.`);
+  }
+  if (implied > MOST_IMPLIED) {
+    return answer(
+      null,
+      `No resistance of ${part} brings this reading to ${volts}; with ${part} open it comes nearest.`,
+    );
   }
   if (implied < 0) {
     return answer(

@@ -1,49 +1,46 @@
 import { type NodalRow, solveRows } from './algebra';
 import type { Network } from './network';
 
-/** Systems up to this size are handed over whole; the library's time grows with the cube. */
-const WHOLE = 5;
-/** Nodes of a group that is taken out. */
-const GROUP = 2;
+/** Systems up to this size are handed over whole; the library's time grows with the cube and more. */
+const WHOLE = 4;
 
 /**
  * Volts of every unknown node, each from equations that nerdamer solved. A large network is taken
- * apart (nested dissection, A. George, SIAM J. Numer. Anal. 10 (1973) 345-363): small groups of nodes
- * are solved for what their neighbours do to them, the neighbours see an equivalent network in their
- * place, and in the end each group is solved with its neighbours known.
+ * apart first: nodes that do not touch each other, those with the fewest neighbours first, are solved
+ * from their own equation for what each neighbour does to them; the neighbours see an equivalent
+ * network in their place (star and mesh; A. Rosen, Journal IEE 62 (1924) 916-918, from memory), and
+ * so on until few enough are left. In the end each node is solved with its neighbours known.
  *
  * Equivalents are sums of products of positive numbers, so no digit is lost where 1 GΩ stands beside
  * 0.01 Ω.
  */
 export function settle(network: Network): Float64Array {
-  const n = network.leak.length;
-  const volts = new Float64Array(n);
+  const volts = new Float64Array(network.leak.length);
   for (const nodes of components(network)) {
     if (nodes.length <= WHOLE) {
-      write(volts, nodes, solveRows(rowsOf(network, nodes, network.drive)));
+      solveRows(rowsOf(network, nodes)).forEach((value, i) => {
+        volts[nodes[i]] = value;
+      });
       continue;
     }
-    const { groups, rest } = divide(network, nodes);
-    const reduced = equivalent(network, groups, rest);
-    write(volts, rest, settle(reduced));
-    for (const group of groups) {
-      const known = Float64Array.from(group, (node) => {
-        let amps = network.drive[node];
-        for (const [other, siemens] of network.between[node]) {
-          if (!group.includes(other)) amps += siemens * volts[other];
-        }
-        return amps;
-      });
-      write(volts, group, solveRows(rowsOf(network, group, known, true)));
+    const { taken, rest } = divide(network, nodes);
+    settle(equivalent(network, taken, rest)).forEach((value, i) => {
+      volts[rest[i]] = value;
+    });
+    for (const node of taken) {
+      let amps = network.drive[node];
+      for (const [other, siemens] of network.between[node]) amps += siemens * volts[other];
+      volts[node] = answer(network, node, amps);
     }
   }
   return volts;
 }
 
-function write(volts: Float64Array, nodes: readonly number[], values: Float64Array): void {
-  nodes.forEach((node, i) => {
-    volts[node] = values[i];
-  });
+/** Volts of one node when so many amps are driven into it and its neighbours stand at 0 V. */
+function answer(network: Network, node: number, amps: number): number {
+  if (amps === 0) return 0;
+  const own = [network.leak[node], ...network.between[node].values()];
+  return solveRows([{ place: 0, own, others: new Float64Array(1), constant: amps }])[0];
 }
 
 /** Sets of nodes that cannot influence each other. */
@@ -66,65 +63,34 @@ function components(network: Network): number[][] {
   return found;
 }
 
-/** Nodal equations of some nodes; `amps` per node (`isLocal`: per place in the list). */
-function rowsOf(
-  network: Network,
-  nodes: readonly number[],
-  amps: Float64Array,
-  isLocal = false,
-): NodalRow[] {
-  return nodes.map((node, i) => {
+/** Nodal equations of nodes that have no other neighbours. */
+function rowsOf(network: Network, nodes: readonly number[]): NodalRow[] {
+  return nodes.map((node, place) => {
     const own = [network.leak[node]];
     const others = new Float64Array(nodes.length);
     for (const [other, siemens] of network.between[node]) {
       own.push(siemens);
-      const j = nodes.indexOf(other);
-      if (j >= 0) others[j] = siemens;
+      others[nodes.indexOf(other)] = siemens;
     }
-    return { place: i, own, others, constant: amps[isLocal ? i : node] };
+    return { place, own, others, constant: network.drive[node] };
   });
 }
 
-/** Groups that touch only nodes of the rest, those with the fewest neighbours first. */
-function divide(
-  network: Network,
-  nodes: readonly number[],
-): { groups: number[][]; rest: number[] } {
+/** Nodes to take out, no two of them neighbours, and those that stay. */
+function divide(network: Network, nodes: readonly number[]): { taken: number[]; rest: number[] } {
   const degree = (node: number) => network.between[node].size;
-  const state = new Map<number, 'group' | 'rest'>();
-  const groups: number[][] = [];
-  for (const first of [...nodes].sort((x, y) => degree(x) - degree(y))) {
-    if (state.has(first)) continue;
-    const group = [first];
-    state.set(first, 'group');
-    while (group.length < GROUP) {
-      const around = neighbours(network, group);
-      // A node joins when the group then has no more neighbours than before.
-      const next = around.find(
-        (node) => !state.has(node) && neighbours(network, [...group, node]).length <= around.length,
-      );
-      if (next === undefined) break;
-      group.push(next);
-      state.set(next, 'group');
-    }
-    neighbours(network, group).forEach((node) => state.set(node, 'rest'));
-    groups.push(group);
+  const stays = new Set<number>();
+  const taken = new Set<number>();
+  for (const node of [...nodes].sort((x, y) => degree(x) - degree(y))) {
+    if (stays.has(node)) continue;
+    taken.add(node);
+    for (const other of network.between[node].keys()) stays.add(other);
   }
-  return { groups, rest: nodes.filter((node) => state.get(node) === 'rest') };
+  return { taken: [...taken], rest: nodes.filter((node) => stays.has(node)) };
 }
 
-function neighbours(network: Network, group: readonly number[]): number[] {
-  const found = new Set(group.flatMap((node) => [...network.between[node].keys()]));
-  group.forEach((node) => found.delete(node));
-  return [...found];
-}
-
-/** The network of the remaining nodes, numbered anew, with equivalents in place of the groups. */
-function equivalent(
-  network: Network,
-  groups: readonly number[][],
-  rest: readonly number[],
-): Network {
+/** The network of the nodes that stay, numbered anew, with equivalents in place of those taken out. */
+function equivalent(network: Network, taken: readonly number[], rest: readonly number[]): Network {
   const place = new Map(rest.map((node, i) => [node, i]));
   const reduced: Network = {
     between: rest.map(() => new Map<number, number>()),
@@ -137,42 +103,23 @@ function equivalent(
       if (j !== undefined) reduced.between[i].set(j, siemens);
     }
   });
-  for (const group of groups) takeOut(network, group, reduced, place);
+  for (const node of taken) {
+    const around = [...network.between[node]].map(
+      ([other, siemens]) => [place.get(other)!, siemens] as const,
+    );
+    const byLeak = answer(network, node, network.leak[node]);
+    const byDrive = answer(network, node, network.drive[node]);
+    around.forEach(([i, siemens], k) => {
+      reduced.leak[i] += siemens * byLeak;
+      reduced.drive[i] += siemens * byDrive;
+      if (k + 1 === around.length) return;
+      const share = answer(network, node, siemens);
+      for (const [j, toOther] of around.slice(k + 1)) {
+        const mutual = toOther * share;
+        reduced.between[i].set(j, (reduced.between[i].get(j) ?? 0) + mutual);
+        reduced.between[j].set(i, (reduced.between[j].get(i) ?? 0) + mutual);
+      }
+    });
+  }
   return reduced;
-}
-
-/** Adds one group's equivalent to the reduced network. */
-function takeOut(
-  network: Network,
-  group: readonly number[],
-  reduced: Network,
-  place: Map<number, number>,
-): void {
-  const around = neighbours(network, group);
-  const answer = (amps: Float64Array): Float64Array =>
-    amps.some((value) => value !== 0)
-      ? solveRows(rowsOf(network, group, amps, true))
-      : new Float64Array(group.length);
-  /** Current into a neighbour when the group's nodes stand at some volts. */
-  const into = (neighbour: number, volts: Float64Array): number =>
-    group.reduce((sum, node, i) => sum + (network.between[neighbour].get(node) ?? 0) * volts[i], 0);
-  const byLeak = answer(Float64Array.from(group, (node) => network.leak[node]));
-  const byDrive = answer(Float64Array.from(group, (node) => network.drive[node]));
-  around.forEach((node) => {
-    const i = place.get(node)!;
-    reduced.leak[i] += into(node, byLeak);
-    reduced.drive[i] += into(node, byDrive);
-  });
-  if (around.length < 2) return;
-  around.forEach((from, k) => {
-    const volts = answer(Float64Array.from(group, (node) => network.between[node].get(from) ?? 0));
-    for (const to of around.slice(k + 1)) {
-      const siemens = into(to, volts);
-      if (siemens === 0) continue;
-      const i = place.get(from)!;
-      const j = place.get(to)!;
-      reduced.between[i].set(j, (reduced.between[i].get(j) ?? 0) + siemens);
-      reduced.between[j].set(i, (reduced.between[j].get(i) ?? 0) + siemens);
-    }
-  });
 }
