@@ -11,7 +11,6 @@ export const alias = { '@': pathTo('./src'), '@engine': pathTo('../service/src/e
 const api = `http://127.0.0.1:${process.env.API_PORT ?? 3000}`;
 
 // Vite reads its settings from a default export only.
-// eslint-disable-next-line no-restricted-syntax
 export default defineConfig({
   plugins: [react()],
   resolve: { alias },

@@ -7,11 +7,13 @@ import { useSession } from '@/lib/session';
 import { PersonMenu } from './PersonMenu';
 import { paths } from './paths';
 import { useShellStyles } from './Shell.styles';
+import { useThemeOf } from './theme-choice';
 
 /** The frame around every screen: skip link, ways to go, who is signed in. */
 export function Component() {
   const styles = useShellStyles();
   const { data: person } = useSession();
+  useThemeOf(person);
   const main = useRef<HTMLElement>(null);
   const { pathname } = useLocation();
   const former = useRef(pathname);
