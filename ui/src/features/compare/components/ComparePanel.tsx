@@ -8,7 +8,7 @@ import { type CaseReading, revisionOfReadings } from '@/lib/bench/case-reading';
 import { TAKE_WORDS } from '@/lib/bench/takes';
 import { useCompare } from '../api/get-compare';
 import { useWidth } from '../hooks/useWidth';
-import { plottedOf, pointsOf, takesOf } from '../plot/compare-model';
+import { firstTake, plottedOf, pointsOf, takesOf } from '../plot/compare-model';
 import { plotOf } from '../plot/plot-geometry';
 import { CompareTable } from './CompareTable';
 import { PlotLegend } from './PlotLegend';
@@ -54,7 +54,7 @@ export function ComparePanel(props: ComparePanelProps) {
 
   const all = compare.data?.points ?? [];
   const takes = takesOf(all);
-  const take = chosen && takes.includes(chosen) ? chosen : takes[0];
+  const take = chosen && takes.includes(chosen) ? chosen : firstTake(all, netlist);
   const points = take ? pointsOf(all, take, netlist) : [];
   const drawn = plottedOf(points);
   const longest = Math.max(4, ...drawn.map(({ label }) => label.length)) * 7.2 + 16;

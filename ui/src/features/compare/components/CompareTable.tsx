@@ -24,7 +24,7 @@ const useStyles = makeStyles({
     borderBottom: `1px solid ${tokens.colorNeutralStroke1}`,
     whiteSpace: 'nowrap',
   },
-  words: { textAlign: 'left', minWidth: '180px' },
+  words: { textAlign: 'left', minWidth: '150px' },
   cell: {
     padding: `${tokens.spacingVerticalS} ${tokens.spacingHorizontalS}`,
     borderBottom: `1px solid ${tokens.colorNeutralStroke3}`,
@@ -65,6 +65,9 @@ export function CompareTable({ points, take, onShowWorking }: CompareTableProps)
             <th scope="col" className={styles.head}>
               Computed
             </th>
+            <th scope="col" className={mergeClasses(styles.head, styles.words)}>
+              In words
+            </th>
             <th scope="col" className={styles.head}>
               Healthy range
             </th>
@@ -73,9 +76,6 @@ export function CompareTable({ points, take, onShowWorking }: CompareTableProps)
                 Published
               </th>
             )}
-            <th scope="col" className={mergeClasses(styles.head, styles.words)}>
-              In words
-            </th>
             {hasWorking && <th className={styles.head} />}
           </tr>
         </thead>
@@ -91,14 +91,6 @@ export function CompareTable({ points, take, onShowWorking }: CompareTableProps)
                   {takenInWords(point.measured, take)}
                 </td>
                 <td className={styles.cell}>{computedInWords(point.value, take)}</td>
-                <td className={mergeClasses(styles.cell, styles.quiet)}>
-                  {point.low === null || point.high === null
-                    ? '–'
-                    : intervalInWords(point.low, point.high, take)}
-                </td>
-                {hasPublished && (
-                  <td className={styles.cell}>{takenInWords(point.published, take)}</td>
-                )}
                 <td
                   className={mergeClasses(
                     styles.cell,
@@ -119,6 +111,14 @@ export function CompareTable({ points, take, onShowWorking }: CompareTableProps)
                   )}
                   {deviationPhrase(point)}
                 </td>
+                <td className={mergeClasses(styles.cell, styles.quiet)}>
+                  {point.low === null || point.high === null
+                    ? '–'
+                    : intervalInWords(point.low, point.high, take)}
+                </td>
+                {hasPublished && (
+                  <td className={styles.cell}>{takenInWords(point.published, take)}</td>
+                )}
                 {hasWorking && (
                   <td className={styles.cell}>
                     {point.part && (

@@ -18,6 +18,22 @@ export function takesOf(points: readonly ComparePoint[]): Take[] {
 }
 
 /**
+ * Chooses the kind of reading shown at first: the one with most points down the string or the rails.
+ *
+ * @returns undefined when there is nothing to compare.
+ */
+export function firstTake(
+  points: readonly ComparePoint[],
+  netlist: Pick<Netlist, 'line' | 'reference'>,
+): Take | undefined {
+  const count = (take: Take) =>
+    points.filter((point) => point.take === take && isAlong(point, netlist)).length;
+  // Ohms stand at every point of any circuit: volts come first wherever there are some.
+  const volts = takesOf(points).filter((take) => take.endsWith('volts'));
+  return [...volts].sort((a, b) => count(b) - count(a))[0] ?? takesOf(points)[0];
+}
+
+/**
  * Orders the points of one kind of reading: the line first, down the string, then readings between two
  * other nodes, then parts.
  *

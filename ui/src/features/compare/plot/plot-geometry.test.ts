@@ -2,6 +2,7 @@ import { type ComparePoint } from '@engine/diagnosis-types';
 import { describe, expect, it } from 'vitest';
 import {
   deviationPhrase,
+  firstTake,
   percentOff,
   plottedOf,
   pointsOf,
@@ -33,6 +34,19 @@ function point(overrides: Partial<ComparePoint>): ComparePoint {
 describe('comparing', () => {
   it('lists kinds of reading, volts before ohms', () => {
     expect(takesOf([point({ take: 'ohms' }), point({})])).toEqual(['ac-volts', 'ohms']);
+  });
+
+  it('begins with the volts that most points have', () => {
+    const dc = point({ take: 'dc-volts' });
+    const all = [
+      point({ at: ['L', 'CHASSIS'] }),
+      dc,
+      dc,
+      ...[1, 2, 3].map(() => point({ take: 'ohms' })),
+    ];
+    expect(firstTake(all, circuit)).toBe('dc-volts');
+    expect(firstTake([point({ take: 'ohms' })], circuit)).toBe('ohms');
+    expect(firstTake([], circuit)).toBeUndefined();
   });
 
   it('orders points down the string, parts after them', () => {

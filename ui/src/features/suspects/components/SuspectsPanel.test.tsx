@@ -59,7 +59,7 @@ describe('SuspectsPanel', () => {
     expect(within(bracket).getAllByRole('article')).toHaveLength(2);
     expect(bracket).toHaveTextContent('What would separate them: ohms across V12, power off');
     expect(bracket).toHaveTextContent(
-      'V13 would need about 3.2 times its value, between 2 and 8 times',
+      'V13 would need about 3.2 times its usual value, between 2 and 8 times',
     );
   });
 

@@ -51,7 +51,7 @@ describe('words of a suspect', () => {
     const fault = { part: 'R1', mode: 'high' as const };
     expect(
       neededValueInWords({ ...fault, value: 9.43, interval: [6.2, 18], valueUnit: 'factor' }),
-    ).toBe('about 9.4 times its value, between 6.2 and 18 times');
+    ).toBe('about 9.4 times its usual value, between 6.2 and 18 times');
     expect(
       neededValueInWords({ ...fault, value: 132, interval: [96, 210], valueUnit: 'ohms' }),
     ).toBe('about 132 Ω, between 96 Ω and 210 Ω');

@@ -64,7 +64,7 @@ function names(text: string, ref: string): boolean {
 /**
  * Says what value a fault needs to explain the readings.
  *
- * @returns "about 9.4 times its value, between 6.2 and 18 times", "about 132 Ω, between 96 Ω and 210 Ω";
+ * @returns "about 9.4 times its usual value, between 6.2 and 18 times", "about 132 Ω, between 96 Ω and 210 Ω";
  *   null when the fault has no unknown value.
  */
 export function neededValueInWords(fault: Suspect['faults'][number]): string | null {
@@ -83,7 +83,7 @@ export function neededValueInWords(fault: Suspect['faults'][number]): string | n
       ? (ohms: number) => formatQuantity(ohms, 'Ω')
       : (factor: number) => `${Number(factor.toPrecision(2))}`;
   const unit = valueUnit === 'ohms' ? '' : ' times';
-  const centre = `about ${write(value)}${unit}${valueUnit === 'ohms' ? '' : ' its value'}`;
+  const centre = `about ${write(value)}${unit}${valueUnit === 'ohms' ? '' : ' its usual value'}`;
   if (!interval) return centre;
   return `${centre}, between ${write(interval[0])} and ${write(interval[1])}${unit}`;
 }
