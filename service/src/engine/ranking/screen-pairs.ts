@@ -14,7 +14,7 @@ export interface ScreenedPair {
 }
 
 /** One settled version of an atom with the spread of every reading beside it. */
-interface Version {
+export interface Version {
   cell: AtomCell;
   sigma: Float64Array;
 }
@@ -24,8 +24,8 @@ const BEST_VERSIONS = 2;
 
 const LOG_ROOT_2PI = 0.5 * Math.log(2 * Math.PI);
 
-/** Versions of one atom, likeliest first. */
-function versionsOf(scorer: Scorer, atom: Atom): Version[] {
+/** Versions of one atom by itself, likeliest first. */
+export function versionsOf(scorer: Scorer, atom: Atom): Version[] {
   const n = scorer.observations.length;
   const out: { version: Version; log: number }[] = [];
   for (const cell of atom.coarse) {
@@ -41,7 +41,12 @@ function versionsOf(scorer: Scorer, atom: Atom): Version[] {
  * Rough log-likelihood: every reading by itself, normal with the wider spread of the two faults, or
  * a slip.
  */
-function roughLog(scorer: Scorer, mean: Float64Array, x: Float64Array, y: Float64Array): number {
+export function roughLog(
+  scorer: Scorer,
+  mean: Float64Array,
+  x: Float64Array,
+  y: Float64Array,
+): number {
   const { observations } = scorer;
   let log = 0;
   for (let r = 0; r < observations.length; r += 1) {
@@ -63,17 +68,19 @@ function roughLog(scorer: Scorer, mean: Float64Array, x: Float64Array, y: Float6
  * Screens every pair of faults on different parts with a quick score, so that two faults that only
  * make sense together are found although neither looks likely alone.
  *
+ * @param versionsFor versions of an atom, as `versionsOf` finds them.
  * @param known sets already scored; their pairs are left out.
  * @returns pairs by falling estimate.
  */
 export function screenPairs(
   scorer: Scorer,
   atoms: readonly Atom[],
+  versionsFor: (atom: Atom) => Version[],
   priors: PriorModel,
   known: ReadonlyMap<string, ScoredSet>,
 ): ScreenedPair[] {
   const mean = new Float64Array(scorer.observations.length);
-  const versions = atoms.map((atom) => versionsOf(scorer, atom));
+  const versions = atoms.map(versionsFor);
   const isHard = atoms.map(({ coarse }) => coarse.length === 1);
   const pairs: ScreenedPair[] = [];
   for (let i = 0; i < atoms.length; i += 1) {

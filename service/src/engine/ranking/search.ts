@@ -3,7 +3,7 @@ import { scanCells, scoreSet, setKey, type ScoredSet } from './fault-set';
 import { logSumExp } from './normal';
 import type { PriorModel } from './priors';
 import type { Scorer } from './scorer';
-import { screenPairs } from './screen-pairs';
+import { roughLog, screenPairs, type Version, versionsOf } from './screen-pairs';
 
 /** What the search found, best first. */
 export interface SearchResult {
@@ -39,6 +39,8 @@ export const SEARCH_LIMITS: SearchLimits = {
 
 /** Sets this far below the best (in ln) do not count as explanations. */
 const FAR = 6;
+/** A reading that moves by less than this many standard deviations counts as left alone. */
+const LEFT_ALONE = 0.5;
 /** Most sets of one size that are combined with further faults. */
 const PER_SIZE = 4;
 
@@ -59,6 +61,7 @@ export class Search {
   private readonly isExtended = new Set<string>();
   /** Estimates of combinations that were screened but not scored in full. */
   private readonly screened = new Map<string, number>();
+  private readonly versions = new Map<string, Version[]>();
 
   constructor(
     private readonly scorer: Scorer,
@@ -119,7 +122,7 @@ export class Search {
 
   /** Screens every pair and scores the promising ones in full. */
   private scorePairs(): void {
-    const pairs = screenPairs(this.scorer, this.atoms, this.priors, this.sets);
+    const pairs = screenPairs(this.scorer, this.atoms, this.versionsFor, this.priors, this.sets);
     for (const { atoms, estimate } of pairs) this.screened.set(setKey(atoms), estimate);
     pairs.slice(0, this.limits.pairs).forEach(({ atoms, start }) => this.add(atoms, start));
   }
@@ -173,9 +176,43 @@ export class Search {
     return next;
   }
 
+  /** Versions of an atom, found once. */
+  private readonly versionsFor = (atom: Atom): Version[] => {
+    const known = this.versions.get(atom.key);
+    if (known) return known;
+    const made = versionsOf(this.scorer, atom);
+    this.versions.set(atom.key, made);
+    return made;
+  };
+
   /** Screens a set together with each other fault and scores the promising combinations in full. */
   private extend(set: ScoredSet): void {
     this.isExtended.add(set.key);
+    const candidates = this.roughCandidates(set)
+      .sort((x, y) => y.estimate - x.estimate)
+      .slice(0, 2 * this.limits.refined)
+      .map((candidate) => this.valuedAnew(set, candidate))
+      .sort((x, y) => y.estimate - x.estimate);
+    const best = this.best();
+    candidates.slice(0, this.limits.refined).forEach(({ atoms, start, estimate }, rank) => {
+      if (rank < 3 || estimate > best - 7) this.add(atoms, start);
+    });
+  }
+
+  /**
+   * A set with each other fault, roughly scored: what the new fault changes in a reading-by-reading
+   * score is added to the set's own full one.
+   */
+  private roughCandidates(set: ScoredSet): Candidate[] {
+    const { scorer } = this;
+    const scored = scorer.scoreWithSpread(set.best);
+    if (!scored) return [];
+    const spread = Float64Array.from(scored.sigma);
+    const before = new Float64Array(spread.length);
+    const mean = new Float64Array(spread.length);
+    const wider = new Float64Array(spread.length);
+    if (!scorer.means(set.best, before)) return [];
+    const own = set.logLikelihood - roughLog(scorer, before, spread, spread);
     const parts = new Set(set.atoms.map(({ part }) => part));
     const candidates: Candidate[] = [];
     for (const atom of this.atoms) {
@@ -183,17 +220,37 @@ export class Search {
       const atoms = [...set.atoms, atom];
       const key = setKey(atoms);
       if (this.sets.has(key) || this.screened.has(key)) continue;
-      const trial = this.screen(set, atom);
-      if (!trial) continue;
-      const estimate = this.priors.of(atoms).log + trial.log;
-      candidates.push({ atoms, start: trial.start, estimate });
+      const logs: number[] = [];
+      let start: ScoredSet['best'] | null = null;
+      for (const { cell, sigma } of this.versionsFor(atom)) {
+        const faults = [...set.best, cell.fault];
+        if (!scorer.means(faults, mean)) continue;
+        // A reading that the new fault leaves alone keeps its spread.
+        for (let r = 0; r < wider.length; r += 1) {
+          wider[r] = Math.abs(mean[r] - before[r]) < LEFT_ALONE * spread[r] ? spread[r] : sigma[r];
+        }
+        const log = cell.logShare + roughLog(scorer, mean, spread, wider);
+        if (start === null || log > Math.max(...logs)) start = faults;
+        logs.push(log);
+      }
+      if (!start) continue;
+      const estimate = this.priors.of(atoms).log + own + logSumExp(logs);
+      candidates.push({ atoms, start, estimate });
       this.screened.set(key, estimate);
     }
-    candidates.sort((x, y) => y.estimate - x.estimate);
-    const best = this.best();
-    candidates.slice(0, this.limits.refined).forEach(({ atoms, start, estimate }, rank) => {
-      if (rank < 3 || estimate > best - 7) this.add(atoms, start);
-    });
+    return candidates;
+  }
+
+  /** A candidate whose set has unknown values, scored with these found anew beside the new fault. */
+  private valuedAnew(set: ScoredSet, candidate: Candidate): Candidate {
+    if (!set.atoms.some(({ coarse }) => coarse.length > 1)) return candidate;
+    const trial = this.screen(set, candidate.atoms[candidate.atoms.length - 1]);
+    if (!trial) return candidate;
+    return {
+      ...candidate,
+      start: trial.start,
+      estimate: this.priors.of(candidate.atoms).log + trial.log,
+    };
   }
 
   /**

@@ -1,4 +1,4 @@
-import type { Trace } from './cycle';
+import type { Trace } from './trace';
 import type { Network } from './network';
 import { runsOf } from './runs';
 

@@ -1,4 +1,4 @@
-import type { Trace } from './cycle';
+import type { Trace } from './trace';
 
 /** Steps of one length under one pattern that follow each other. */
 export interface Run {

@@ -1,4 +1,4 @@
-import type { Trace } from './cycle';
+import type { Trace } from './trace';
 import { cubicAt, cubicTurn, type Span } from './cubic';
 import { dot } from './dense';
 import type { BranchElement } from './elements';
