@@ -61,22 +61,19 @@ export class CycleRunner {
     while (time < period) {
       const conduction = network.met[at];
       let length = Math.min(step / finer, period - time);
-      const event = finder.attempt(conduction, start, length, time);
+      this.isRough ||= switchings >= mostSwitchings;
+      const event = finder.attempt(conduction, start, length, time, !this.isRough);
       let flips = -1;
-      if (switchings < mostSwitchings) {
-        if (event && !isShort && since < SHORT_RUN && event.length > 1e-6 * step) {
+      if (event) {
+        if (!isShort && since < SHORT_RUN && event.length > 1e-6 * step) {
           // A pulse shorter than a few steps: sample it finely, or averages miss its shape.
           finer = (SHORT_RUN + 0.5) * (step / event.length);
           isShort = true;
           continue;
         }
-        if (event) {
-          flips = event.rectifier;
-          length = event.length;
-          switchings += 1;
-        }
-      } else {
-        this.isRough = true;
+        flips = event.rectifier;
+        length = event.length;
+        switchings += 1;
       }
       const isLast = time + length >= period * (1 - 1e-13);
       time = isLast ? period : time + length;
@@ -136,3 +133,4 @@ export class CycleRunner {
       network.met[trace.which[k]].propagator.carry(d, 0, trace.length[k]);
     }
   }
+}

@@ -89,9 +89,10 @@ export function solveSteadyState(
     } else if (isClose && search.size <= tolerance) {
       runner.correct(search.step);
     }
-    if ((isClose && isSettled) || isLast) {
+    const isDone = isClose && isSettled;
+    if (isDone || isLast) {
       gram ??= gatherGram(network, runner.trace);
-      return new SteadyState(network, runner.trace, isClose && isSettled, cycle, gram);
+      return new SteadyState(network, runner.trace, isDone && !runner.isRough, cycle, gram);
     }
     search.next(x0, runner.end);
   }

@@ -47,6 +47,7 @@ export class SwitchingFinder {
   /**
    * Tries one step from `start`.
    *
+   * @param isLocated false takes the whole step whatever the rectifiers do in it.
    * @returns the first switching within it, with `trial` moved to that instant; nothing when no
    *   rectifier switches and `trial` is the end of the step.
    */
@@ -55,9 +56,11 @@ export class SwitchingFinder {
     start: Float64Array,
     length: number,
     time: number,
+    isLocated: boolean,
   ): Switching | undefined {
     this.move(conduction, start, length, time, this.trial);
     this.look(conduction, this.trial, this.nextGaps, this.nextRates);
+    if (!isLocated) return undefined;
     return this.firstSwitching(conduction, start, length, time);
   }
 
