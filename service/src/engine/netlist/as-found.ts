@@ -1,6 +1,7 @@
 import { NetlistError } from '../errors';
-import { FIELDS, fieldProblem } from './fields';
+import { FIELDS, fieldProblem, swappedField } from './fields';
 import { readNetlist } from './read';
+import { isObject } from './reader';
 import type { AsFound, Netlist, NetlistProblem, Part } from './types';
 
 /** Fields that a part of another type brings along. */
@@ -53,6 +54,12 @@ function withFields(
       problems.push(problem('bad-value', `${path}/${name}`, `${part.ref}: ${wrong}`, part.ref));
     fields[name] = value;
   }
+  const odd = swappedField(part.kind, { ...part, ...fields });
+  if (odd) {
+    problems.push(
+      problem('bad-value', `${path}/${odd.field}`, `${part.ref}: ${odd.message}`, part.ref),
+    );
+  }
   if (Object.keys(fields).length === 0 && problems.length === 0) {
     problems.push(
       problem(
@@ -85,6 +92,10 @@ export function applyAsFound(netlist: Netlist, asFound: readonly AsFound[]): Net
   const changed = new Set<string>();
   asFound.forEach((entry, i) => {
     const path = `/asFound/${i}`;
+    if (!isObject(entry)) {
+      problems.push(problem('bad-change', path, 'Each thing found must be an object.'));
+      return;
+    }
     const change = entry as Change;
     if (change.change === 'added') {
       const added = change.add as Part | undefined;

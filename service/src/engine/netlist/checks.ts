@@ -1,27 +1,5 @@
+import { islandProblems, sourceLoops } from './islands';
 import type { Netlist, NetlistProblem, Part } from './types';
-
-/** Resistances at or below this count as a dead short when loops of sources are looked for. */
-const DEAD_SHORT = 1e-6;
-
-/** Joins nodes into islands and tells which island a node belongs to. */
-class Islands {
-  private readonly parent = new Map<string, string>();
-
-  of(node: string): string {
-    let root = node;
-    for (let up = this.parent.get(root); up !== undefined; up = this.parent.get(root)) root = up;
-    return root;
-  }
-
-  /** Joins two nodes; false when they were one island already. */
-  join(a: string, b: string): boolean {
-    const x = this.of(a);
-    const y = this.of(b);
-    if (x === y) return false;
-    this.parent.set(x, y);
-    return true;
-  }
-}
 
 function partsAt(netlist: Netlist): Map<string, Part[]> {
   const at = new Map<string, Part[]>();
@@ -103,67 +81,6 @@ function lineProblems(netlist: Netlist, at: Map<string, Part[]>): NetlistProblem
   );
 }
 
-/** Nodes that nothing ties to the reference: a voltage there would mean nothing. */
-function islandProblems(netlist: Netlist, at: Map<string, Part[]>): NetlistProblem[] {
-  const islands = new Islands();
-  for (const { between } of netlist.parts) islands.join(between[0], between[1]);
-  if (netlist.line) islands.join(netlist.line.hot, netlist.line.return);
-  if (
-    !at.has(netlist.reference) &&
-    netlist.line?.return !== netlist.reference &&
-    netlist.line?.hot !== netlist.reference
-  ) {
-    return [
-      {
-        code: 'reference-not-connected',
-        nodes: [netlist.reference],
-        path: '/reference',
-        message: `Readings are taken against node ${netlist.reference}, but no part is connected there.`,
-      },
-    ];
-  }
-  const home = islands.of(netlist.reference);
-  const lineHome = netlist.line ? islands.of(netlist.line.hot) : home;
-  const lost = new Map<string, string[]>();
-  for (const node of at.keys()) {
-    const island = islands.of(node);
-    // A transformer's primary side may hang on the line alone.
-    if (island === home || island === lineHome) continue;
-    lost.set(island, [...(lost.get(island) ?? []), node]);
-  }
-  return [...lost.values()].map((nodes) => ({
-    code: 'no-path-to-reference',
-    nodes,
-    message: `Nothing connects ${nodes.length === 1 ? 'node' : 'nodes'} ${nodes.join(', ')} to ${netlist.reference}. Add the missing wire or part.`,
-  }));
-}
-
-/** Ideal sources shorted by one another or by a dead short. */
-function sourceLoops(netlist: Netlist): NetlistProblem[] {
-  const islands = new Islands();
-  const { line } = netlist;
-  if (line && !(line.ohms && line.ohms > 0)) islands.join(line.hot, line.return);
-  return netlist.parts.flatMap((part, i) => {
-    const isIdeal =
-      'ohms' in part &&
-      part.ohms !== undefined &&
-      part.ohms <= DEAD_SHORT &&
-      part.kind !== 'rectifier';
-    if (!isIdeal || part.between[0] === part.between[1]) return [];
-    return islands.join(part.between[0], part.between[1])
-      ? []
-      : [
-          {
-            code: 'loop-of-ideal-sources',
-            part: part.ref,
-            nodes: [...part.between],
-            path: `/parts/${i}/ohms`,
-            message: `${part.ref} closes a loop without any resistance between ${part.between[0]} and ${part.between[1]}. Give it its real ohms.`,
-          },
-        ];
-  });
-}
-
 function pointProblems(netlist: Netlist, at: Map<string, Part[]>): NetlistProblem[] {
   const isThere = (node: string) =>
     at.has(node) ||
@@ -213,6 +130,35 @@ function pointProblems(netlist: Netlist, at: Map<string, Part[]>): NetlistProble
   return problems;
 }
 
+/** Kinds that do nothing at all with one end free; a spare resistor or tap end may stand in a drawing. */
+const NEVER_FREE = new Set<Part['kind']>(['heater', 'lamp', 'thermistor']);
+
+/** Heaters and lamps with an end that leads nowhere: most often two spellings of one node. */
+function danglingEnds(netlist: Netlist, at: Map<string, Part[]>): NetlistProblem[] {
+  const { line, reference } = netlist;
+  const tied = new Set([reference, line?.hot, line?.return]);
+  for (const part of netlist.parts) if (part.kind === 'heater') tied.add(part.cathode);
+  return netlist.parts.flatMap((part, i) => {
+    if (!NEVER_FREE.has(part.kind) || part.between[0] === part.between[1]) return [];
+    return part.between.flatMap((node, end) => {
+      if (tied.has(node) || at.get(node)!.length > 1) return [];
+      const twin = [...at.keys()].find(
+        (other) => other !== node && other.toLowerCase() === node.toLowerCase(),
+      );
+      const hint = twin === undefined ? 'Connect it.' : `Is it the same as node ${twin}?`;
+      return [
+        {
+          code: 'dangling-node',
+          part: part.ref,
+          nodes: [node],
+          path: `/parts/${i}/between/${end}`,
+          message: `Only ${part.ref} is connected at node ${node}, so no current can flow. ${hint}`,
+        },
+      ];
+    });
+  });
+}
+
 /** Rectifiers with nothing to feed: their steady state says nothing about a set. */
 function loadProblems(netlist: Netlist): NetlistProblem[] {
   const rectifiers = netlist.parts.filter(({ kind }) => kind === 'rectifier');
@@ -244,6 +190,7 @@ export function checkNetlist(netlist: Netlist): NetlistProblem[] {
     ...selfLoops(netlist),
     ...lineProblems(netlist, at),
     ...islandProblems(netlist, at),
+    ...danglingEnds(netlist, at),
     ...sourceLoops(netlist),
     ...pointProblems(netlist, at),
     ...loadProblems(netlist),

@@ -1,8 +1,8 @@
 import { parse } from 'csv-parse/sync';
 import { CsvError, type CsvProblem } from '../errors';
-import { parseQuantity, parseRating, type Unit } from '../units';
-import { FIELDS, fieldProblem } from './fields';
-import { type Netlist, type Part, PART_KINDS, type PartKind } from './types';
+import { MEANING, partOf, RATED } from './csv-row';
+import { MOST_PARTS } from './read';
+import type { Netlist, Part } from './types';
 
 /** Columns of the file, in order. */
 export const CSV_HEADER = [
@@ -18,124 +18,46 @@ export const CSV_HEADER = [
   'note',
 ];
 
-type Row = Record<string, string>;
+/** A row with the line it begins on, counted from 1 with the header. */
+interface PlacedRow {
+  line: number;
+  cells: string[];
+}
 
-/** Field and unit that `value` fills, and field and unit of `rating`, by kind. */
-const MEANING: Record<PartKind, { value?: [string, Unit]; rating?: [string, Unit] }> = {
-  resistor: { value: ['ohms', 'Ω'], rating: ['watts', 'W'] },
-  heater: {},
-  lamp: {},
-  thermistor: { value: ['hotOhms', 'Ω'] },
-  switch: { value: ['ohms', 'Ω'] },
-  fuse: { value: ['ohms', 'Ω'] },
-  joint: { value: ['ohms', 'Ω'] },
-  capacitor: { value: ['farads', 'F'], rating: ['volts', 'V'] },
-  rectifier: { value: ['ohms', 'Ω'] },
-  choke: { value: ['henries', 'H'], rating: ['ohms', 'Ω'] },
-  winding: { rating: ['ohms', 'Ω'] },
-  load: {},
-};
-const RATED: readonly PartKind[] = ['heater', 'lamp', 'load', 'winding'];
+function refuseFile(code: string, line: number, message: string): CsvError {
+  return new CsvError([{ code, line, column: 'ref', message: `Line ${line}: ${message}` }]);
+}
 
-/** One part out of one row; problems go into the list. */
-function partOf(row: Row, line: number, problems: CsvProblem[]): Part | null {
-  const bad = (column: string, message: string, code = 'bad-value') => {
-    problems.push({ code, line, column, message: `Line ${line}, column ${column}: ${message}` });
-  };
-  const kind = row.kind as PartKind;
-  if (!PART_KINDS.includes(kind)) {
-    bad(
-      'kind',
-      `“${row.kind}” is no kind of part. Kinds are ${PART_KINDS.join(', ')}.`,
-      'unknown-kind',
+/** Splits a file into rows; empty ones are left out, and every other keeps its line. */
+function readRows(text: string): PlacedRow[] {
+  // The parser counts a carriage return inside quotes as a line of its own.
+  const lines = text.replace(/\r\n?/g, '\n');
+  const spoilt = lines.indexOf('\uFFFD');
+  if (spoilt >= 0) {
+    const line = lines.slice(0, spoilt).split('\n').length;
+    throw refuseFile(
+      'not-utf8',
+      line,
+      'the file is not UTF-8. Save it as CSV UTF-8 and try again.',
     );
-    return null;
   }
-  if (!/^[A-Za-z0-9_-]{1,24}$/.test(row.ref)) {
-    bad('ref', 'A part needs a reference of 1 to 24 letters, digits, “-” or “_”.', 'bad-ref');
-  }
-  for (const column of ['from', 'to']) {
-    if (!/^\S{1,40}$/.test(row[column]))
-      bad(column, 'A node needs a name of 1 to 40 characters without spaces.', 'bad-node');
-  }
-  const part: Record<string, unknown> = { ref: row.ref, kind, between: [row.from, row.to] };
-  const put = (column: string, [field, unit]: [string, Unit]) => {
-    if (row[column] === '') return;
-    const parsed = parseQuantity(row[column], unit);
-    if (!parsed.ok) bad(column, parsed.message);
-    else if (parsed.value === 'OL') bad(column, 'A part cannot have the value OL.');
-    else part[field] = parsed.value;
-  };
-  if (RATED.includes(kind)) {
-    const rating = parseRating(row.value);
-    if (rating) Object.assign(part, rating);
-    else if (kind === 'winding' && row.value !== '') put('value', ['volts', 'V']);
-    else bad('value', `A ${kind} needs its volts and amps, such as 12.6V 150mA.`);
-    if (kind === 'winding') delete part.amps;
-  } else if (kind === 'thermistor') thermistorOf(row, part, bad);
-  else if (MEANING[kind].value) put('value', MEANING[kind].value);
-  if (MEANING[kind].rating) put('rating', MEANING[kind].rating);
-  if (row.tolerance !== '') {
-    const percent = /^(?:±|\+\/-)?\s*([\d.]+)\s*%$/.exec(row.tolerance);
-    part.tolerance = percent ? Number(percent[1]) / 100 : Number(row.tolerance);
-  }
-  for (const column of ['make', 'assembly', 'note'] as const) {
-    if (row[column] !== '') part[column] = row[column];
-  }
-  checkFields(part, kind, problems, bad);
-  return part as unknown as Part;
-}
-
-/** A thermistor's value is written `18Ω 160Ω 450mA`: hot ohms, cold ohms, amps. */
-function thermistorOf(
-  row: Row,
-  part: Record<string, unknown>,
-  bad: (column: string, message: string) => void,
-): void {
-  const words = row.value.split(/\s+/);
-  const units: [string, Unit][] = [
-    ['hotOhms', 'Ω'],
-    ['coldOhms', 'Ω'],
-    ['amps', 'A'],
-  ];
-  if (words.length !== 3) {
-    bad('value', 'A thermistor needs hot ohms, cold ohms and amps, such as 18 160 450mA.');
-    return;
-  }
-  units.forEach(([field, unit], i) => {
-    const parsed = parseQuantity(words[i], unit);
-    if (parsed.ok && typeof parsed.value === 'number') part[field] = parsed.value;
-    else bad('value', parsed.ok ? 'A part cannot have the value OL.' : parsed.message);
-  });
-}
-
-/** Checks the fields of a part by the same rules as a JSON document. */
-function checkFields(
-  part: Record<string, unknown>,
-  kind: PartKind,
-  problems: readonly CsvProblem[],
-  bad: (column: string, message: string, code?: string) => void,
-): void {
-  const before = problems.length;
-  const columnOf = (field: string) =>
-    ['tolerance', 'make', 'assembly', 'note'].includes(field)
-      ? field
-      : MEANING[kind].rating?.[0] === field
-        ? 'rating'
-        : 'value';
-  for (const [field, rule] of Object.entries(FIELDS[kind])) {
-    if (part[field] === undefined) {
-      if (rule.isRequired && before === problems.length && !(kind === 'thermistor')) {
-        bad(columnOf(field), `A ${kind} needs “${field}”.`, 'missing-field');
-      }
-      continue;
-    }
-    const wrong = fieldProblem(field, rule, part[field]);
-    if (wrong) bad(columnOf(field), wrong);
-  }
-  for (const field of Object.keys(part)) {
-    if (['ref', 'kind', 'between'].includes(field) || FIELDS[kind][field]) continue;
-    bad(columnOf(field), `A ${kind} has no “${field}”.`, 'unknown-field');
+  try {
+    const rows = parse(lines, {
+      bom: true,
+      relax_column_count: true,
+      skip_empty_lines: true,
+      skip_records_with_empty_values: true,
+      trim: true,
+      info: true,
+      raw: true,
+    }) as unknown as { info: { lines: number }; raw: string; record: string[] }[];
+    return rows.map(({ info, raw, record }) => ({
+      line: info.lines - (raw.trim().match(/\n/g)?.length ?? 0),
+      cells: record,
+    }));
+  } catch (error) {
+    const { lines: line = 1, message = '' } = error as { lines?: number; message?: string };
+    throw refuseFile('not-csv', line, `the file is not valid CSV. ${message.split('\n')[0]}.`);
   }
 }
 
@@ -146,40 +68,17 @@ function checkFields(
  * @throws CsvError with line, column and reason of every bad row; nothing of such a file is taken.
  */
 export function importCsv(text: string): { parts: Part[] } {
-  let rows: string[][];
-  try {
-    rows = parse(text, { bom: true, relax_column_count: true, skip_empty_lines: true, trim: true });
-  } catch (error) {
-    const { lines = 1, message = '' } = error as { lines?: number; message?: string };
-    throw new CsvError([
-      {
-        code: 'not-csv',
-        line: lines,
-        column: 'ref',
-        message: `Line ${lines}: the file is not valid CSV. ${message.split('\n')[0]}.`,
-      },
-    ]);
-  }
-  const [header, ...body] = rows;
+  const [{ cells: header = [] } = {}, ...body] = readRows(text);
   if (
-    !header ||
     header.length !== CSV_HEADER.length ||
     header.some((name, i) => name.toLowerCase() !== CSV_HEADER[i])
   ) {
-    throw new CsvError([
-      {
-        code: 'bad-header',
-        line: 1,
-        column: 'ref',
-        message: `Line 1: the header must be ${CSV_HEADER.join(',')}.`,
-      },
-    ]);
+    throw refuseFile('bad-header', 1, `the header must be ${CSV_HEADER.join(',')}.`);
   }
   const problems: CsvProblem[] = [];
   const seen = new Map<string, number>();
   const parts: Part[] = [];
-  body.forEach((cells, i) => {
-    const line = i + 2;
+  body.forEach(({ line, cells }) => {
     if (cells.length !== CSV_HEADER.length) {
       problems.push({
         code: 'bad-row',
@@ -210,6 +109,14 @@ export function importCsv(text: string): { parts: Part[] } {
       line: 2,
       column: 'ref',
       message: 'The file has a header but no parts.',
+    });
+  }
+  if (body.length > MOST_PARTS) {
+    problems.push({
+      code: 'too-many-parts',
+      line: body[MOST_PARTS].line,
+      column: 'ref',
+      message: `The file has ${body.length} parts; ${MOST_PARTS} is the most. Split the circuit.`,
     });
   }
   if (problems.length > 0) throw new CsvError(problems);

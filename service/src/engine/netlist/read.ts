@@ -1,83 +1,26 @@
 import { NetlistError } from '../errors';
-import { FIELDS, fieldProblem } from './fields';
-import { type Netlist, type NetlistProblem, PART_KINDS, type PartKind } from './types';
+import { FIELDS, fieldProblem, swappedField } from './fields';
+import { pointerStep, refProblem } from './names';
+import { isObject, Reader } from './reader';
+import { type Netlist, PART_KINDS, type PartKind } from './types';
 
 /** Largest circuit that is taken. */
 export const MOST_PARTS = 400;
-const REF = /^[A-Za-z0-9_-]{1,24}$/;
-const NODE = /^\S{1,40}$/;
+const MOST_POINTS = 1000;
 const TOP = ['ohmstead', 'title', 'reference', 'line', 'parts', 'points', 'layout', '$schema'];
 const LINE = ['hot', 'return', 'volts', 'hertz', 'ohms'];
 const PUBLISHED = ['acVolts', 'dcVolts', 'rippleVolts', 'ohms'];
 
-type Record_ = Record<string, unknown>;
-
-function isRecord(value: unknown): value is Record_ {
-  return typeof value === 'object' && value !== null && !Array.isArray(value);
-}
-
-/** Collects problems while a document is read. */
-class Reader {
-  readonly problems: NetlistProblem[] = [];
-
-  add(code: string, path: string, message: string, part?: string): void {
-    this.problems.push({ code, message, path, ...(part === undefined ? {} : { part }) });
-  }
-
-  /** Refuses fields that the format does not know. */
-  known(
-    value: Record_,
-    names: readonly string[],
-    path: string,
-    where: string,
-    part?: string,
-  ): void {
-    for (const name of Object.keys(value)) {
-      if (!names.includes(name)) {
-        this.add(
-          'unknown-field',
-          `${path}/${name}`,
-          `${where} has a field “${name}” that the format does not know. Remove it or check its spelling.`,
-          part,
-        );
-      }
-    }
-  }
-
-  node(value: unknown, path: string, where: string, part?: string): void {
-    if (typeof value !== 'string' || !NODE.test(value)) {
-      this.add(
-        'bad-node',
-        path,
-        `${where} must name a node: 1 to 40 characters without spaces.`,
-        part,
-      );
-    }
-  }
-
-  positive(value: unknown, path: string, where: string): void {
-    if (typeof value !== 'number' || !Number.isFinite(value) || value <= 0) {
-      this.add('bad-value', path, `${where} must be a number above zero.`);
-    }
-  }
-}
-
 function readPart(reader: Reader, value: unknown, path: string): void {
-  if (!isRecord(value)) {
+  if (!isObject(value)) {
     reader.add('bad-part', path, 'Every part must be an object with ref, kind and between.');
     return;
   }
   const { ref, kind, between } = value;
   const name = typeof ref === 'string' ? ref : undefined;
   const called = name ?? 'A part';
-  if (typeof ref !== 'string' || !REF.test(ref)) {
-    reader.add(
-      'bad-ref',
-      `${path}/ref`,
-      'A part needs a reference of 1 to 24 letters, digits, “-” or “_”, such as R1B.',
-      name,
-    );
-  }
+  const wrongRef = refProblem(ref);
+  if (wrongRef) reader.add(wrongRef.code, `${path}/ref`, wrongRef.message, name);
   if (!PART_KINDS.includes(kind as PartKind)) {
     reader.add(
       'unknown-kind',
@@ -111,10 +54,12 @@ function readPart(reader: Reader, value: unknown, path: string): void {
     const problem = fieldProblem(field, rule, value[field]);
     if (problem) reader.add('bad-value', `${path}/${field}`, `${called}: ${problem}`, name);
   }
+  const odd = swappedField(kind as PartKind, value);
+  if (odd) reader.add('bad-value', `${path}/${odd.field}`, `${called}: ${odd.message}`, name);
 }
 
 function readLine(reader: Reader, value: unknown): void {
-  if (!isRecord(value)) {
+  if (!isObject(value)) {
     reader.add(
       'bad-line',
       '/line',
@@ -125,10 +70,10 @@ function readLine(reader: Reader, value: unknown): void {
   reader.known(value, LINE, '/line', 'The line');
   reader.node(value.hot, '/line/hot', 'The hot side of the line');
   reader.node(value.return, '/line/return', 'The return of the line');
-  reader.positive(value.volts, '/line/volts', 'The line voltage');
-  reader.positive(value.hertz, '/line/hertz', 'The line frequency');
-  if (value.ohms !== undefined && (typeof value.ohms !== 'number' || !(value.ohms >= 0))) {
-    reader.add('bad-value', '/line/ohms', 'The line’s source resistance must be zero or more.');
+  reader.between(value.volts, 1, 1000, '/line/volts', 'The line voltage');
+  reader.between(value.hertz, 10, 1000, '/line/hertz', 'The line frequency');
+  if (value.ohms !== undefined) {
+    reader.between(value.ohms, 0, 1e6, '/line/ohms', 'The line’s source resistance');
   }
 }
 
@@ -137,9 +82,13 @@ function readPoints(reader: Reader, value: unknown): void {
     reader.add('bad-points', '/points', 'The points must be a list.');
     return;
   }
+  if (value.length > MOST_POINTS) {
+    reader.add('too-many-points', '/points', `A circuit can have ${MOST_POINTS} points at most.`);
+    return;
+  }
   value.forEach((point: unknown, i) => {
     const path = `/points/${i}`;
-    if (!isRecord(point)) {
+    if (!isObject(point)) {
       reader.add('bad-point', path, 'Every point must be an object with node and label.');
       return;
     }
@@ -153,13 +102,13 @@ function readPoints(reader: Reader, value: unknown): void {
       );
     }
     if (point.published === undefined) return;
-    if (!isRecord(point.published)) {
+    if (!isObject(point.published)) {
       reader.add('bad-value', `${path}/published`, 'Published values must be an object.');
       return;
     }
     reader.known(point.published, PUBLISHED, `${path}/published`, 'The published values');
     for (const [name, number] of Object.entries(point.published)) {
-      if (PUBLISHED.includes(name) && (typeof number !== 'number' || !Number.isFinite(number))) {
+      if (PUBLISHED.includes(name) && !(typeof number === 'number' && Number.isFinite(number))) {
         reader.add(
           'bad-value',
           `${path}/published/${name}`,
@@ -171,20 +120,20 @@ function readPoints(reader: Reader, value: unknown): void {
 }
 
 function readLayout(reader: Reader, value: unknown): void {
-  if (!isRecord(value)) {
+  if (!isObject(value)) {
     reader.add('bad-layout', '/layout', 'The layout must be an object with one entry per part.');
     return;
   }
   for (const [ref, place] of Object.entries(value)) {
     const isPlace =
-      isRecord(place) &&
+      isObject(place) &&
       Number.isFinite(place.x) &&
       Number.isFinite(place.y) &&
       [0, 1, 2, 3].includes(place.turn as number);
     if (!isPlace) {
       reader.add(
         'bad-layout',
-        `/layout/${ref}`,
+        `/layout/${pointerStep(ref)}`,
         `The place of ${ref} needs x, y and turn (0 to 3 quarter turns).`,
         ref,
       );
@@ -201,7 +150,7 @@ function readLayout(reader: Reader, value: unknown): void {
  */
 export function readNetlist(json: unknown): Netlist {
   const reader = new Reader();
-  if (!isRecord(json)) {
+  if (!isObject(json)) {
     reader.add(
       'not-a-netlist',
       '',

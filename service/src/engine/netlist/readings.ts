@@ -1,4 +1,7 @@
+import { pointerStep } from './names';
+import { isObject } from './reader';
 import {
+  type Meter,
   type Netlist,
   type NetlistProblem,
   type Reading,
@@ -123,21 +126,59 @@ function valueProblem(netlist: Netlist, { take, value, seen }: Reading): Netlist
       `${value} ${UNITS[take]} cannot be right on this circuit. Check the range and the decimal point.`,
     );
   }
-  if (
-    (take === 'ac-volts' || take === 'ripple-volts' || take === 'amps') &&
-    value < 0 &&
-    size > 0.01 &&
-    take !== 'amps'
-  ) {
+  // The last digits of a meter can flicker below zero.
+  if ((take === 'ac-volts' || take === 'ripple-volts') && value < -0.01) {
     return bad('negative-volts', 'An AC voltage has no sign. Enter it without the minus.');
   }
   return null;
 }
 
+/** Fields of a meter and the largest value each can have; all are numbers above or at zero. */
+const METER: Record<keyof Meter, number> = {
+  ohms: 1e12,
+  ohmsPerVolt: 1e9,
+  fullScale: 1e5,
+  ofReading: 0.5,
+  ofFullScale: 0.5,
+  digits: 1000,
+  resolution: 1e9,
+  overOhms: 1e12,
+};
+/** Fields that would divide by zero or load the circuit with a short. */
+const ABOVE_ZERO: (keyof Meter)[] = ['ohms', 'ohmsPerVolt', 'fullScale', 'overOhms'];
+
+function meterProblems({ meter }: Reading): NetlistProblem[] {
+  if (meter === undefined) return [];
+  if (!isObject(meter)) {
+    return [{ code: 'bad-meter', path: '/meter', message: 'The meter must be an object.' }];
+  }
+  const problems: NetlistProblem[] = [];
+  const add = (name: string, message: string) =>
+    problems.push({ code: 'bad-meter', path: `/meter/${pointerStep(name)}`, message });
+  for (const [name, value] of Object.entries(meter)) {
+    if (!Object.hasOwn(METER, name)) {
+      add(name, `A meter has no “${name}”.`);
+      continue;
+    }
+    const least = ABOVE_ZERO.includes(name as keyof Meter) ? Number.MIN_VALUE : 0;
+    const most = METER[name as keyof Meter];
+    if (typeof value !== 'number' || !(value >= least && value <= most)) {
+      add(
+        name,
+        `The meter’s “${name}” must be a number ${least > 0 ? 'above' : 'from'} 0, ${most} at most.`,
+      );
+    }
+  }
+  if (meter.ohmsPerVolt !== undefined && meter.fullScale === undefined) {
+    add('fullScale', 'A moving-coil meter needs the full scale of the range it was on.');
+  }
+  return problems;
+}
+
 /**
  * Checks one reading against a circuit: its place, its kind and a value that could be.
  *
- * @returns problems with a pointer into the reading (`/value`, `/at`, `/part`, `/seen`, `/take`).
+ * @returns problems with a pointer into the reading (`/value`, `/at`, `/part`, `/seen`, `/take`, `/meter/…`).
  */
 export function checkReading(netlist: Netlist, reading: Reading): NetlistProblem[] {
   if (!TAKES.includes(reading.take)) {
@@ -145,7 +186,8 @@ export function checkReading(netlist: Netlist, reading: Reading): NetlistProblem
       { code: 'unknown-take', path: '/take', message: `A reading is one of ${TAKES.join(', ')}.` },
     ];
   }
-  return [placeProblem(netlist, reading), valueProblem(netlist, reading)].filter(
+  const first = [placeProblem(netlist, reading), valueProblem(netlist, reading)].filter(
     (problem): problem is NetlistProblem => problem !== null,
   );
+  return [...first, ...meterProblems(reading)];
 }
