@@ -11,6 +11,7 @@ import {
   Text,
   tokens,
 } from '@fluentui/react-components';
+import { useDialogLeave } from '@/hooks/useDialogLeave';
 import { FormMessage } from '@/components/FormMessage';
 import { problemInWords } from '@/lib/bench/problem';
 import { useAcknowledgeCautions } from '../api/acknowledge-cautions';
@@ -44,9 +45,10 @@ interface CautionsDialogProps {
 /** The cautions of a set; reading them is recorded once per case and person. */
 export function CautionsDialog({ caseId, set, netlist, onClose }: CautionsDialogProps) {
   const styles = useStyles();
+  const { isOpen, leave } = useDialogLeave(onClose);
   const acknowledge = useAcknowledgeCautions(caseId);
   return (
-    <Dialog open onOpenChange={(_event, { open }) => !open && onClose()}>
+    <Dialog open={isOpen} onOpenChange={(_event, { open }) => !open && leave()}>
       <DialogSurface className={styles.surface}>
         <DialogBody>
           <DialogTitle>Before power</DialogTitle>
@@ -67,14 +69,14 @@ export function CautionsDialog({ caseId, set, netlist, onClose }: CautionsDialog
             />
           </DialogContent>
           <DialogActions>
-            <Button size="large" onClick={onClose}>
+            <Button size="large" onClick={() => leave()}>
               Stay with cold readings
             </Button>
             <Button
               appearance="primary"
               size="large"
               disabled={acknowledge.isPending}
-              onClick={() => acknowledge.mutate(undefined, { onSuccess: onClose })}
+              onClick={() => acknowledge.mutate(undefined, { onSuccess: () => leave() })}
             >
               I have read them
             </Button>

@@ -18,6 +18,7 @@ import {
 } from '@fluentui/react-components';
 import { useState } from 'react';
 import { FormMessage } from '@/components/FormMessage';
+import { useDialogLeave } from '@/hooks/useDialogLeave';
 import { type Case, type ConfirmedFault, type Outcome } from '@/lib/api-model';
 import { problemInWords } from '@/lib/bench/problem';
 import { FAULT_WORDS, OUTCOME_WORDS } from '@/lib/words';
@@ -52,6 +53,7 @@ interface CloseCaseDialogProps {
 /** Asks how a case ended and which faults were confirmed. */
 export function CloseCaseDialog({ repair, proposed, onClose }: CloseCaseDialogProps) {
   const styles = useStyles();
+  const { isOpen, leave } = useDialogLeave(onClose);
   const close = useCloseCase(String(repair.id));
   const [outcome, setOutcome] = useState<Outcome>('repaired');
   const [faults, setFaults] = useState(proposed);
@@ -73,11 +75,11 @@ export function CloseCaseDialog({ repair, proposed, onClose }: CloseCaseDialogPr
     }
     close.mutate(
       { outcome, confirmedFaults: outcome === 'no-fault' ? [] : faults, note: note.trim() },
-      { onSuccess: onClose },
+      { onSuccess: () => leave() },
     );
   };
   return (
-    <Dialog open onOpenChange={(_event, { open }) => !open && onClose()}>
+    <Dialog open={isOpen} onOpenChange={(_event, { open }) => !open && leave()}>
       <DialogSurface className={styles.surface}>
         <DialogBody>
           <DialogTitle>Close the case</DialogTitle>
@@ -150,7 +152,7 @@ export function CloseCaseDialog({ repair, proposed, onClose }: CloseCaseDialogPr
             />
           </DialogContent>
           <DialogActions>
-            <Button size="large" onClick={onClose}>
+            <Button size="large" onClick={() => leave()}>
               Cancel
             </Button>
             <Button appearance="primary" size="large" disabled={close.isPending} onClick={send}>

@@ -13,6 +13,7 @@ import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
 import { FormMessage } from '@/components/FormMessage';
 import { TextField } from '@/components/TextField';
+import { useDialogLeave } from '@/hooks/useDialogLeave';
 import { type Case, type FamilySummary } from '@/lib/api-model';
 import { showProblem } from '@/lib/form-problems';
 import { type OpenCaseForm, openCaseSchema, useOpenCase } from '../api/open-case';
@@ -34,6 +35,7 @@ interface OpenCaseDialogProps {
 /** Asks what is on the bench, what is wrong with it and where its circuit comes from. */
 export function OpenCaseDialog(props: OpenCaseDialogProps) {
   const styles = useStyles();
+  const { isOpen, leave } = useDialogLeave(props.onClose);
   const openCase = useOpenCase();
   const { control, handleSubmit, setError, setValue, formState } = useForm<OpenCaseForm>({
     resolver: zodResolver(openCaseSchema),
@@ -53,22 +55,25 @@ export function OpenCaseDialog(props: OpenCaseDialogProps) {
     },
   });
   const send = handleSubmit((form) =>
-    openCase.mutateAsync(form).then(props.onOpened, (error: unknown) => {
-      showProblem(
-        error,
-        setError,
-        ['set', 'complaint', 'familyId', 'csv', 'reference', 'lineVolts'],
-        {
-          netlist: form.source === 'csv' ? 'csv' : 'netlistText',
-          parts: form.source === 'csv' ? 'csv' : 'netlistText',
-          line: form.source === 'csv' ? 'hot' : 'netlistText',
-          title: 'set',
-        },
-      );
-    }),
+    openCase.mutateAsync(form).then(
+      (opened) => leave(() => props.onOpened(opened)),
+      (error: unknown) => {
+        showProblem(
+          error,
+          setError,
+          ['set', 'complaint', 'familyId', 'csv', 'reference', 'lineVolts'],
+          {
+            netlist: form.source === 'csv' ? 'csv' : 'netlistText',
+            parts: form.source === 'csv' ? 'csv' : 'netlistText',
+            line: form.source === 'csv' ? 'hot' : 'netlistText',
+            title: 'set',
+          },
+        );
+      },
+    ),
   );
   return (
-    <Dialog open onOpenChange={(_event, { open }) => !open && props.onClose()}>
+    <Dialog open={isOpen} onOpenChange={(_event, { open }) => !open && leave()}>
       <DialogSurface className={styles.surface}>
         <form noValidate onSubmit={(event) => void send(event)}>
           <DialogBody>
@@ -103,7 +108,7 @@ export function OpenCaseDialog(props: OpenCaseDialogProps) {
               />
             </DialogContent>
             <DialogActions>
-              <Button size="large" onClick={props.onClose}>
+              <Button size="large" onClick={() => leave()}>
                 Cancel
               </Button>
               <Button type="submit" appearance="primary" size="large" disabled={openCase.isPending}>

@@ -16,6 +16,7 @@ import { useState } from 'react';
 import { useController, useForm } from 'react-hook-form';
 import { FormMessage } from '@/components/FormMessage';
 import { TextField } from '@/components/TextField';
+import { useDialogLeave } from '@/hooks/useDialogLeave';
 import { ROLES } from '@/lib/api-model';
 import { showProblem } from '@/lib/form-problems';
 import { ROLE_HINTS, ROLE_WORDS } from '@/lib/words';
@@ -35,6 +36,7 @@ const useStyles = makeStyles({
 /** Asks whom to invite, then shows the link to hand over. */
 export function InviteDialog({ onClose }: { onClose: () => void }) {
   const styles = useStyles();
+  const { isOpen, leave } = useDialogLeave(onClose);
   const invite = useInvitePerson();
   const [invitation, setInvitation] = useState<Invitation>();
   const { control, handleSubmit, setError, formState } = useForm<InvitePersonInput>({
@@ -50,7 +52,7 @@ export function InviteDialog({ onClose }: { onClose: () => void }) {
     }),
   );
   return (
-    <Dialog open onOpenChange={(_event, { open }) => !open && onClose()}>
+    <Dialog open={isOpen} onOpenChange={(_event, { open }) => !open && leave()}>
       <DialogSurface className={styles.surface}>
         <form noValidate onSubmit={(event) => void send(event)}>
           <DialogBody>
@@ -86,7 +88,7 @@ export function InviteDialog({ onClose }: { onClose: () => void }) {
               )}
             </DialogContent>
             <DialogActions>
-              <Button size="large" onClick={onClose}>
+              <Button size="large" onClick={() => leave()}>
                 {invitation ? 'Done' : 'Cancel'}
               </Button>
               {!invitation && (

@@ -14,6 +14,8 @@ interface SuspectCardProps {
   readings: readonly (CaseReading | undefined)[];
   netlist: Netlist;
   isOpenAtFirst: boolean;
+  /** False leaves the reason out until the card is opened: it stands on the card above already. */
+  hasReason: boolean;
   onSelectPart?: (ref: string) => void;
   onShowWorking?: (part: string) => void;
 }
@@ -63,7 +65,12 @@ export function SuspectCard(props: SuspectCardProps) {
     return words ? [{ part: fault.part, words }] : [];
   });
   const parts = [...new Set(suspect.faults.map(({ part }) => part))];
-  const hasMore = suspect.evidence.length > 0 || suspect.rules.length > 0 || !!suspect.cause;
+  const hasMore =
+    suspect.evidence.length > 0 ||
+    suspect.rules.length > 0 ||
+    suspect.reasons.length > 1 ||
+    !!suspect.cause ||
+    parts.length > 0;
 
   return (
     <article className={styles.root} aria-labelledby={`${id}-title`}>
@@ -74,11 +81,13 @@ export function SuspectCard(props: SuspectCardProps) {
         <Text className={styles.chance}>{chanceInWords(suspect.probability)}</Text>
       </div>
       <ChanceBar probability={suspect.probability} />
-      {suspect.reasons.slice(0, isOpen ? undefined : 2).map((reason) => (
-        <p key={reason} className={styles.reasons}>
-          {reason}
-        </p>
-      ))}
+      {(isOpen || props.hasReason ? suspect.reasons : [])
+        .slice(0, isOpen ? undefined : 1)
+        .map((reason) => (
+          <p key={reason} className={styles.reasons}>
+            {reason}
+          </p>
+        ))}
       {needed.map(({ part, words }) => (
         <p key={`${part} ${words}`} className={styles.reasons}>
           To explain the readings, {part} would need {words}.
@@ -91,14 +100,16 @@ export function SuspectCard(props: SuspectCardProps) {
             appearance="subtle"
             className={styles.button}
             icon={isOpen ? <ChevronDownRegular /> : <ChevronRightRegular />}
+            aria-label={`${isOpen ? 'Less' : 'Why'} about ${suspect.title}`}
             aria-expanded={isOpen}
             aria-controls={`${id}-more`}
             onClick={() => setIsOpen(!isOpen)}
           >
-            {isOpen ? 'Less' : 'Evidence and rules'}
+            {isOpen ? 'Less' : 'Why'}
           </Button>
         )}
-        {props.onSelectPart &&
+        {isOpen &&
+          props.onSelectPart &&
           parts.map((part) => (
             <Button
               key={part}
@@ -110,7 +121,8 @@ export function SuspectCard(props: SuspectCardProps) {
               Show {part}
             </Button>
           ))}
-        {props.onShowWorking &&
+        {isOpen &&
+          props.onShowWorking &&
           parts.map((part) => (
             <Button
               key={part}

@@ -50,6 +50,7 @@ export function SuspectGroups(props: SuspectGroupsProps) {
             readings={props.readings}
             netlist={netlist}
             isOpenAtFirst={groupIndex === 0 && index === 0}
+            hasReason={index === 0}
             onSelectPart={props.onSelectPart}
             onShowWorking={props.onShowWorking}
           />

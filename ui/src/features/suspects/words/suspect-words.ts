@@ -100,6 +100,8 @@ export function wouldShowInWords(
   const centre = computedInWords(evidence.predicted, reading.take);
   if (evidence.predicted === null) return centre;
   if (evidence.low === undefined || evidence.high === undefined) return centre;
+  const isNothing = computedInWords(evidence.high, reading.take) === centre;
+  if (isNothing && computedInWords(evidence.low, reading.take) === centre) return centre;
   return `${centre} (${intervalInWords(evidence.low, evidence.high, reading.take)})`;
 }
 

@@ -54,7 +54,7 @@ export function ClosedFormForm({ caseId, netlist, readings, part }: ClosedFormFo
     ({ take, value, at }) =>
       take !== 'sign' && typeof value === 'number' && at?.[0] !== netlist.line?.hot,
   );
-  const [chosenPart, setChosenPart] = useState(part ?? netlist.parts[0]?.ref ?? '');
+  const [chosenPart, setChosenPart] = useState(part ?? firstChoice(netlist));
   const [chosenReading, setChosenReading] = useState('');
   const closedForm = useClosedForm(caseId);
   const reading = usable.find(({ id }) => String(id) === chosenReading) ?? usable[0];
@@ -118,4 +118,10 @@ export function ClosedFormForm({ caseId, netlist, readings, part }: ClosedFormFo
       )}
     </div>
   );
+}
+
+/** A resistor is what most often has drifted; else the first part there is. */
+function firstChoice(netlist: Netlist): string {
+  const resistor = netlist.parts.find(({ kind }) => kind === 'resistor');
+  return (resistor ?? netlist.parts[0])?.ref ?? '';
 }

@@ -19,6 +19,8 @@ const useStyles = makeStyles({
     fontSize: tokens.fontSizeBase400,
   },
   text: {
+    display: 'block',
+    padding: `${tokens.spacingVerticalXS} 0`,
     fontFamily: tokens.fontFamilyMonospace,
     whiteSpace: 'pre-wrap',
     overflowWrap: 'anywhere',

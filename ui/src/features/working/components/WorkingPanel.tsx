@@ -35,9 +35,14 @@ const useStyles = makeStyles({
     fontWeight: tokens.fontWeightSemibold,
   },
   intro: { margin: `0 0 ${tokens.spacingVerticalS}`, maxWidth: '70ch' },
-  equations: { margin: 0, display: 'grid', gridTemplateColumns: 'minmax(90px, auto) 1fr' },
+  equations: {
+    margin: 0,
+    display: 'grid',
+    gridTemplateColumns: 'minmax(90px, auto) minmax(0, 1fr)',
+    alignItems: 'center',
+  },
   node: {
-    padding: `${tokens.spacingVerticalS} ${tokens.spacingHorizontalM} 0 0`,
+    paddingRight: tokens.spacingHorizontalM,
     color: tokens.colorNeutralForeground3,
     fontSize: tokens.fontSizeBase200,
   },

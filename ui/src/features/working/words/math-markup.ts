@@ -16,6 +16,9 @@ const TAGS = new Set([
   'msup',
   'msub',
   'msubsup',
+  'munder',
+  'mover',
+  'munderover',
 ]);
 
 /**
