@@ -17,11 +17,16 @@ const SMALL = 1e-6;
  *
  * @param system the network at its operating point.
  * @param check volts of the same nodes from the numeric engine; nodes left out are not compared.
+ * @param agreement largest relative difference from `check` that counts as agreeing.
  * @returns volts of every node. `agreesWithSolver` is false, and a note says where, when an answer
  *   differs from `check` by more than 1e-6 or misses its equations by more than 1e-9.
  * @throws EngineError `island` or `no-distinct-solution` when the equations have no single solution.
  */
-export function solveExpected(system: NodalSystem, check: Record<string, number>): Working {
+export function solveExpected(
+  system: NodalSystem,
+  check: Record<string, number>,
+  agreement = AGREEMENT,
+): Working {
   const { network, unknowns } = numbered(system);
   const volts = settle(network);
   const solution: Record<string, number> = {};
@@ -31,7 +36,7 @@ export function solveExpected(system: NodalSystem, check: Record<string, number>
   });
   const residual = residualOf(system, solution);
   const notes = notesOf(system);
-  const differences = differencesOf(solution, check);
+  const differences = differencesOf(solution, check, agreement);
   if (residual.size > MOST_RESIDUAL) {
     notes.push(
       `The solution misses the equation of ${residual.node} by ${figures(residual.size, 2)} of its largest term. Do not rely on these values.`,
@@ -78,13 +83,17 @@ export function residualOf(
   return worst;
 }
 
-function differencesOf(solution: Record<string, number>, check: Record<string, number>): string[] {
+function differencesOf(
+  solution: Record<string, number>,
+  check: Record<string, number>,
+  agreement: number,
+): string[] {
   const largest = Object.values(solution).reduce((most, v) => Math.max(most, Math.abs(v)), 0);
   return Object.entries(check)
     .filter(([node]) => node in solution)
     .filter(([node, volts]) => {
       const size = Math.max(Math.abs(volts), Math.abs(solution[node]), SMALL * largest);
-      return !(Math.abs(solution[node] - volts) <= AGREEMENT * size);
+      return !(Math.abs(solution[node] - volts) <= agreement * size);
     })
     .map(
       ([node, volts]) =>

@@ -1,8 +1,12 @@
 import type { OperatingPoint } from '../diagnosis-types';
 import { applyFaults, type SettledFault } from '../faults/apply';
-import { healthyValues } from './branch-values';
+import { type BranchValues, healthyValues } from './branch-values';
 import type { Circuit } from './circuit';
 import { RmsNetwork } from './rms-network';
+import { WaveNetwork } from './wave-network';
+
+/** Averages below this are none; a meter would show zero. */
+const LEAST_VOLTS = 1e-4;
 
 /**
  * Voltages at every node against the reference, and volts, amps and watts of every part, of the
@@ -16,10 +20,12 @@ export function operatingPoint(
 ): OperatingPoint {
   const rms = new RmsNetwork(circuit);
   const out: OperatingPoint = { nodes: {}, parts: {} };
-  if (!rms.solve(applyFaults(healthyValues(circuit), circuit, faults))) return out;
+  const values = applyFaults(healthyValues(circuit), circuit, faults);
+  if (!rms.solve(values)) return out;
   const black = rms.volts[circuit.reference];
   circuit.nodes.forEach((node, index) => {
-    if (rms.covers(index)) out.nodes[node] = { acVolts: Math.abs(rms.volts[index] - black) };
+    if (rms.covers(index) && circuit.hot >= 0)
+      out.nodes[node] = { acVolts: Math.abs(rms.volts[index] - black) };
   });
   circuit.parts.forEach(({ ref }, k) => {
     if (!circuit.isSteady[k]) return;
@@ -28,5 +34,35 @@ export function operatingPoint(
     const amps = Math.abs(rms.amps[k]);
     out.parts[ref] = { volts, amps, watts: volts * amps };
   });
+  addWaveforms(circuit, values, out);
   return out;
+}
+
+/** Adds what the blocks with rectifiers show: averages and ripple at nodes, RMS values at parts. */
+function addWaveforms(circuit: Circuit, values: BranchValues, out: OperatingPoint): void {
+  const wave = new WaveNetwork(circuit);
+  if (!wave.isNeeded) return;
+  const solution = wave.solve(values);
+  if (!solution) return;
+  const { state, element } = solution;
+  const black = wave.rowOf(circuit.reference);
+  circuit.nodes.forEach((node, index) => {
+    const row = wave.rowOf(index);
+    if (row < 0 || black < 0 || index === circuit.hot || index === circuit.return) return;
+    const { mean, acRms } = state.pair(row, black);
+    out.nodes[node] = {
+      dcVolts: Math.abs(mean) < LEAST_VOLTS ? 0 : mean,
+      acVolts: acRms,
+      rippleVolts: state.pairPeakToPeak(row, black),
+    };
+  });
+  for (const k of wave.branches) {
+    const { a, b, part, isLeak } = circuit.branches[k];
+    if (isLeak || element[k] < 0) continue;
+    out.parts[circuit.parts[part].ref] = {
+      volts: state.pair(wave.rowOf(a), wave.rowOf(b)).rms,
+      amps: state.current(element[k]).rms,
+      watts: Math.abs(state.power(element[k])),
+    };
+  }
 }

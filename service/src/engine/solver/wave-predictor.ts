@@ -340,6 +340,9 @@ function keyOf(faults: readonly SettledFault[]): string {
     .join('|');
 }
 
+/** Averages below this are left over from rounding. */
+const LEAST_VOLTS = 1e-5;
+
 /** What a meter that draws nothing shows. */
 export function readMeter(
   network: WaveNetwork,
@@ -356,7 +359,10 @@ export function readMeter(
   const x = network.rowOf(a);
   const y = network.rowOf(b);
   if (x < 0 || y < 0) return take === 'ac-volts' && a === circuit.hot ? circuit.lineVolts : 0;
-  if (take === 'dc-volts') return state.pair(x, y).mean;
+  if (take === 'dc-volts') {
+    const { mean } = state.pair(x, y);
+    return Math.abs(mean) < LEAST_VOLTS ? 0 : mean;
+  }
   if (take === 'ripple-volts') return state.pairPeakToPeak(x, y);
   return state.pair(x, y).acRms;
 }

@@ -39,8 +39,8 @@ export function expectedWorking(input: CircuitInput): Working {
       },
     ]);
   }
-  const workings = systems.map(({ system, check, notes }) => {
-    const working = solveExpected(system, check);
+  const workings = systems.map(({ system, check, notes, agreement }) => {
+    const working = solveExpected(system, check, agreement);
     return { ...working, notes: [...notes, ...working.notes] };
   });
   return {

@@ -14,6 +14,8 @@ export interface DescribedSystem {
 /** A system with the numeric engine's own answer beside it. */
 export interface CheckedSystem extends DescribedSystem {
   check: Record<string, number>;
+  /** How closely two ways of solving can agree: averages over a cycle carry an error of their own. */
+  agreement: number;
 }
 
 function unknownNodes(
@@ -58,6 +60,7 @@ export function alternatingSystem(circuit: Circuit): CheckedSystem | null {
             'Heaters, lamps and thermistors stand at the resistance they settle at with this line voltage.',
           ]
         : [],
+    agreement: 1e-6,
     check: Object.fromEntries(nodes.map((node) => [node, rms.volts[circuit.nodeIndex.get(node)!]])),
   };
 }
@@ -71,7 +74,16 @@ export function directSystem(circuit: Circuit): CheckedSystem | null {
   if (!solution) return null;
   const { state, element } = solution;
   const name = (node: number) => circuit.nodes[node];
-  const mean = (node: number) => state.pair(wave.rowOf(node), 0).mean;
+  const largest = Math.max(
+    ...circuit.nodes.map((_, node) =>
+      Math.abs(wave.rowOf(node) > 0 ? state.pair(wave.rowOf(node), 0).mean : 0),
+    ),
+  );
+  // Below a millionth of the largest average the cycle cannot tell a voltage from none.
+  const mean = (node: number) => {
+    const value = state.pair(wave.rowOf(node), 0).mean;
+    return Math.abs(value) < 1e-6 * largest ? 0 : value;
+  };
   const branches: NodalConductance[] = [];
   const injections: Record<string, number> = {};
   const inject = (node: number, amps: number) => {
@@ -122,6 +134,7 @@ export function directSystem(circuit: Circuit): CheckedSystem | null {
     notes: [
       'In the rectifier block each rectifier is replaced by the average current that the cycle-by-cycle solution found for it; capacitors carry no direct current.',
     ],
+    agreement: 1e-5,
     check: Object.fromEntries(kept.map((node) => [node, mean(circuit.nodeIndex.get(node)!)])),
   };
 }
