@@ -1,3 +1,4 @@
+import { isPictureTube } from '../netlist/picture-tube';
 import type { CapacitorMake, FaultMode, Part, RectifierMake, ResistorMake } from '../netlist/types';
 
 /** One way a part fails, its odds in a set that came in for repair, and where they come from. */
@@ -114,7 +115,7 @@ const OTHERS = {
   heater: {
     rate: 0.06,
     age: 1,
-    // Published for no heater; four in five of those that fail burn open.
+    // Published for no heater; three in four of those that fail by themselves burn open.
     shares: { open: 0.66, 'heater-cathode-leak': 0.15, shorted: 0.07, 'wrong-type': 0.12 },
     source: `rate assumed from tube removals (ARINC study, early 1950s); ${ASSUMED}; ${BENCH}`,
   },
@@ -190,7 +191,6 @@ function lineOf(part: Part): RateLine {
  */
 export function priorOdds(part: Part): PriorOdds[] {
   const { rate, age, shares, source } = lineOf(part);
-  const isPictureTube = part.kind === 'heater' && /picture|crt/i.test(part.tube ?? '');
   return Object.entries(shares).map(([mode, share]) => ({
     mode: mode as FaultMode,
     odds:
@@ -198,7 +198,7 @@ export function priorOdds(part: Part): PriorOdds[] {
       rate *
       age *
       share *
-      (isPictureTube && mode === 'wrong-type' ? PICTURE_TUBE_WRONG_TYPE : 1),
+      (mode === 'wrong-type' && isPictureTube(part) ? PICTURE_TUBE_WRONG_TYPE : 1),
     source,
   }));
 }

@@ -1,4 +1,5 @@
 import type { DiagnosisInput } from '../diagnosis-types';
+import { isPictureTube } from '../netlist/picture-tube';
 import type { Netlist, Part, Reading } from '../netlist/types';
 
 /** What a fact is, for the person who writes rules and for the check of a rule. */
@@ -164,11 +165,6 @@ export const FACTS: Record<string, FactDefinition> = {
 };
 
 export type FactValues = Record<string, number | boolean | string | undefined>;
-
-/** True for a heater whose tube is named as a picture tube. */
-export function isPictureTube(part: Part): boolean {
-  return part.kind === 'heater' && /picture|crt/i.test(part.tube ?? '');
-}
 
 function lastOn(readings: readonly Reading[], take: string, part: string): Reading | undefined {
   return readings.findLast((reading) => reading.take === take && reading.part === part);

@@ -1,5 +1,5 @@
+import { isPictureTube } from '../netlist/picture-tube';
 import type { Part } from '../netlist/types';
-import { isPictureTube } from './facts';
 import type { PartSelector } from './types';
 
 /** Kinds that carry the heater current when they stand in a string. */
