@@ -10,6 +10,7 @@ export function buildPerson(overrides: Partial<Person> = {}): Person {
     role: 'technician',
     isBlocked: false,
     isInvited: false,
+    abilities: { managePeople: false, writeFamilies: false, closeCases: true, change: false },
     ...overrides,
   };
 }
@@ -28,6 +29,8 @@ export function buildCaseSummary(overrides: Partial<CaseSummary> = {}): CaseSumm
     complaint: 'Dead. No tube lights.',
     state: 'on-the-bench',
     openedAt: '2026-03-04T09:00:00.000Z',
+    changedAt: '2026-03-04T09:00:00.000Z',
+    readings: 0,
     openedBy: { id: 2, name: 'Tove Lindqvist' },
     assignedTo: null,
     familyId: 1,

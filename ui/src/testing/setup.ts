@@ -1,6 +1,9 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterEach, vi } from 'vitest';
+
+// Screens load when they are first wanted, which takes its time on a busy machine.
+configure({ asyncUtilTimeout: 8000 });
 
 // jsdom lays nothing out, so what measures the page is given steady answers.
 class SteadyResizeObserver implements ResizeObserver {
