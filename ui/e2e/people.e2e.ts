@@ -30,7 +30,7 @@ test.each<ScreenName>(['desktop', 'phone'])(
     await dialog.getByRole('button', { name: 'Make the invitation' }).click();
     const link = await dialog.getByLabel('Invitation link').inputValue();
     await dialog.getByRole('button', { name: 'Done' }).click();
-    await owner.page.getByText(`Kim Abara ${screen}`).waitFor();
+    await owner.page.getByRole('combobox', { name: `Role of Kim Abara ${screen}` }).waitFor();
     expect(owner.troubles).toEqual([]);
     await owner.leave();
 
