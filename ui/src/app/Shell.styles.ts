@@ -41,15 +41,23 @@ export const useShellStyles = makeStyles({
     gap: tokens.spacingHorizontalXS,
     overflowX: 'auto',
     scrollbarWidth: 'none',
-    [atMost.phone]: { order: 3, width: '100%', flexBasis: '100%' },
+    [atMost.phone]: { order: 3, columnGap: 0, width: '100%', flexBasis: '100%' },
   },
   // In a case the sections stand at the bottom; a second row of links would push the pad off the screen.
   navInCase: { [atMost.phone]: { display: 'none' } },
   link: {
-    display: 'inline-flex',
-    alignItems: 'center',
+    display: 'inline-grid',
+    alignContent: 'center',
     minHeight: extraTokens.touchHeight,
     padding: `0 ${tokens.spacingHorizontalM}`,
+    // Room for the bold word, so that the others stay where they are when one is chosen.
+    '::after': {
+      content: 'attr(data-label)',
+      height: 0,
+      overflow: 'hidden',
+      visibility: 'hidden',
+      fontWeight: tokens.fontWeightSemibold,
+    },
     color: tokens.colorNeutralForeground2,
     textDecoration: 'none',
     whiteSpace: 'nowrap',
@@ -59,7 +67,7 @@ export const useShellStyles = makeStyles({
       borderBottomColor: tokens.colorNeutralStroke1,
     },
     ':focus-visible': { outlineOffset: '-3px' },
-    [atMost.phone]: { padding: `0 ${tokens.spacingHorizontalS}` },
+    [atMost.phone]: { padding: '0 clamp(4px, 1.5vw, 8px)' },
   },
   linkHere: {
     color: tokens.colorBrandForeground1,

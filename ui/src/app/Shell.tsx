@@ -50,6 +50,7 @@ export function Component() {
               key={to}
               to={to}
               end={isExact}
+              data-label={label}
               className={({ isActive }) => mergeClasses(styles.link, isActive && styles.linkHere)}
             >
               {label}

@@ -34,7 +34,13 @@ export function TextField<Values extends FieldValues>(props: TextFieldProps<Valu
       label={props.label}
       hint={props.hint}
       required={props.isRequired}
-      validationMessage={fieldState.error?.message}
+      validationMessage={
+        fieldState.error?.message && {
+          // A list of column names has no spaces to break at.
+          style: { overflowWrap: 'anywhere', minWidth: 0 },
+          children: fieldState.error.message,
+        }
+      }
     >
       {props.lines && props.lines > 1 ? (
         <Textarea

@@ -23,7 +23,8 @@ export function showProblem<Values extends FieldValues>(
     if (!field) continue;
     // The first thing said about a field is shown; the next one follows when it is mended.
     if (!placed.has(field)) {
-      const text = line ? `Line ${line}: ${message}` : message;
+      const isPlaced = !line || message.startsWith(`Line ${line}:`);
+      const text = isPlaced ? message : `Line ${line}: ${message}`;
       setError(field, { message: text }, { shouldFocus: placed.size === 0 });
     }
     placed.add(field);

@@ -1,4 +1,4 @@
-import { Button, makeStyles } from '@fluentui/react-components';
+import { Button } from '@fluentui/react-components';
 import { lazy, Suspense, useDeferredValue, useState } from 'react';
 import { useNavigate, useSearchParams } from 'react-router-dom';
 import { paths } from '@/app/paths';
@@ -6,6 +6,7 @@ import { EmptyState } from '@/components/EmptyState';
 import { FailedState } from '@/components/FailedState';
 import { LoadingState } from '@/components/LoadingState';
 import { PageHeader } from '@/components/PageHeader';
+import { usePageStyles } from '@/components/page-styles';
 import { type CaseFilter, useCases } from '@/features/cases/api/get-cases';
 import { CaseCards } from '@/features/cases/components/CaseCards';
 import { CaseFilters } from '@/features/cases/components/CaseFilters';
@@ -13,7 +14,6 @@ import { CaseTable } from '@/features/cases/components/CaseTable';
 import { useFamilies } from '@/features/families/api/get-families';
 import { useMediaQuery } from '@/hooks/useMediaQuery';
 import { problemInWords } from '@/lib/bench/problem';
-import { extraTokens } from '@/theme/extra-tokens';
 
 // The form's rules weigh as much as the list; they load when a case is opened.
 const OpenCaseDialog = lazy(() =>
@@ -22,11 +22,9 @@ const OpenCaseDialog = lazy(() =>
   })),
 );
 
-const useStyles = makeStyles({ root: { maxWidth: extraTokens.pageWidth, margin: '0 auto' } });
-
 /** The bench: what is open and whose it is. */
 export function Component() {
-  const styles = useStyles();
+  const page = usePageStyles();
   const navigate = useNavigate();
   const [isOpening, setIsOpening] = useState(false);
   const [filter, setFilter] = useFilterInUrl();
@@ -42,7 +40,7 @@ export function Component() {
     </Button>
   );
   return (
-    <div className={styles.root}>
+    <div className={page.list}>
       <PageHeader title="Bench" hint="Every set that is being worked on." actions={open} />
       <CaseFilters filter={filter} onChange={(_event, next) => setFilter(next)} />
       {cases.isPending ? (

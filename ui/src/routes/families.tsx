@@ -5,11 +5,11 @@ import { EmptyState } from '@/components/EmptyState';
 import { FailedState } from '@/components/FailedState';
 import { LoadingState } from '@/components/LoadingState';
 import { PageHeader } from '@/components/PageHeader';
+import { usePageStyles } from '@/components/page-styles';
 import { useFamilies } from '@/features/families/api/get-families';
 import { FamilyCards } from '@/features/families/components/FamilyCards';
 
 const useStyles = makeStyles({
-  root: { maxWidth: '1200px', margin: '0 auto' },
   search: { maxWidth: '420px', marginBottom: tokens.spacingVerticalL },
   box: { width: '100%', maxWidth: 'none' },
 });
@@ -17,10 +17,11 @@ const useStyles = makeStyles({
 /** The shop's chassis families. */
 export function Component() {
   const styles = useStyles();
+  const page = usePageStyles();
   const [search, setSearch] = useState('');
   const families = useFamilies(useDeferredValue(search));
   return (
-    <div className={styles.root}>
+    <div className={page.list}>
       <PageHeader
         title="Families"
         hint="Sets that share one chassis share one circuit, and what their solved cases found."

@@ -13,6 +13,7 @@ import { EmptyState } from '@/components/EmptyState';
 import { FailedState } from '@/components/FailedState';
 import { LoadingState } from '@/components/LoadingState';
 import { PageHeader } from '@/components/PageHeader';
+import { usePageStyles } from '@/components/page-styles';
 import {
   PARTS_PAGE,
   type PartsTable as Table,
@@ -23,7 +24,6 @@ import { PartsTable } from '@/features/parts-data/components/PartsTable';
 import { useMediaQuery } from '@/hooks/useMediaQuery';
 
 const useStyles = makeStyles({
-  root: { maxWidth: '1200px', margin: '0 auto' },
   bar: {
     display: 'flex',
     flexWrap: 'wrap',
@@ -45,6 +45,7 @@ const useStyles = makeStyles({
 /** Heater and lamp ratings that the engine reckons with. */
 export function Component() {
   const styles = useStyles();
+  const frame = usePageStyles();
   const [table, setTable] = useState<Table>('tubes');
   const [search, setSearch] = useState('');
   const [offset, setOffset] = useState(0);
@@ -54,7 +55,7 @@ export function Component() {
   const caption = table === 'tubes' ? 'Heater ratings of tubes' : 'Ratings of lamps';
   const last = Math.min(offset + PARTS_PAGE, total);
   return (
-    <div className={styles.root}>
+    <div className={frame.list}>
       <PageHeader
         title="Parts data"
         hint="Ratings that the computed values rest on. Check those marked as from memory against a data book."

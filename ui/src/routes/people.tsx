@@ -1,4 +1,4 @@
-import { Button, makeStyles } from '@fluentui/react-components';
+import { Button } from '@fluentui/react-components';
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { paths } from '@/app/paths';
@@ -7,6 +7,7 @@ import { FailedState } from '@/components/FailedState';
 import { FormMessage } from '@/components/FormMessage';
 import { LoadingState } from '@/components/LoadingState';
 import { PageHeader } from '@/components/PageHeader';
+import { usePageStyles } from '@/components/page-styles';
 import { useChangePerson } from '@/features/people/api/change-person';
 import { usePeople } from '@/features/people/api/get-people';
 import { InviteDialog } from '@/features/people/components/InviteDialog';
@@ -14,14 +15,13 @@ import { PeopleTable } from '@/features/people/components/PeopleTable';
 import { problemInWords } from '@/lib/bench/problem';
 import { useSession } from '@/lib/session';
 
-const useStyles = makeStyles({ root: { maxWidth: '1000px', margin: '0 auto' } });
-
 /** Who works in the shop; for its owner. */
 export function Component() {
+  const page = usePageStyles();
   const { data: person } = useSession();
   if (person?.role === 'owner') return <People ownId={person.id} />;
   return (
-    <>
+    <div className={page.text}>
       <PageHeader title="People" />
       <EmptyState
         title="Only the owner of the shop sees its people."
@@ -29,17 +29,17 @@ export function Component() {
       >
         Ask the owner when somebody is to be invited or needs another role.
       </EmptyState>
-    </>
+    </div>
   );
 }
 
 function People({ ownId }: { ownId: number }) {
-  const styles = useStyles();
+  const page = usePageStyles();
   const people = usePeople();
   const change = useChangePerson();
   const [isInviting, setIsInviting] = useState(false);
   return (
-    <div className={styles.root}>
+    <div className={page.text}>
       <PageHeader
         title="People"
         hint="Everybody who works here, and what they may do."

@@ -4,11 +4,11 @@ import { paths } from '@/app/paths';
 import { FailedState } from '@/components/FailedState';
 import { LoadingState } from '@/components/LoadingState';
 import { PageHeader } from '@/components/PageHeader';
+import { usePageStyles } from '@/components/page-styles';
 import { useRule } from '@/features/rules/api/get-rule';
 import { RuleSheet } from '@/features/rules/components/RuleSheet';
 
 const useStyles = makeStyles({
-  root: { maxWidth: '960px', margin: '0 auto' },
   back: {
     display: 'inline-flex',
     alignItems: 'center',
@@ -20,10 +20,11 @@ const useStyles = makeStyles({
 /** One rule in full. */
 export function Component() {
   const styles = useStyles();
+  const page = usePageStyles();
   const { ruleId = '' } = useParams();
   const rule = useRule(ruleId);
   return (
-    <div className={styles.root}>
+    <div className={page.text}>
       <Link to={paths.rules} className={styles.back}>
         All rules
       </Link>

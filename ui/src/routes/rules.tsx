@@ -5,12 +5,12 @@ import { EmptyState } from '@/components/EmptyState';
 import { FailedState } from '@/components/FailedState';
 import { LoadingState } from '@/components/LoadingState';
 import { PageHeader } from '@/components/PageHeader';
+import { usePageStyles } from '@/components/page-styles';
 import { useRules } from '@/features/rules/api/get-rules';
 import { RuleCard } from '@/features/rules/components/RuleCard';
 import { type RuleSummary } from '@/lib/api-model';
 
 const useStyles = makeStyles({
-  root: { maxWidth: '960px', margin: '0 auto' },
   search: { maxWidth: '420px', marginBottom: tokens.spacingVerticalXL },
   box: { width: '100%', maxWidth: 'none' },
   pack: {
@@ -32,11 +32,12 @@ const useStyles = makeStyles({
 /** What the shop's technicians know, as rules in sentences. */
 export function Component() {
   const styles = useStyles();
+  const page = usePageStyles();
   const rules = useRules();
   const [search, setSearch] = useState('');
   const packs = useMemo(() => byPack(rules.data?.rules ?? [], search), [rules.data, search]);
   return (
-    <div className={styles.root}>
+    <div className={page.text}>
       <PageHeader
         title="Rules"
         hint="What technicians know beside the circuit. Each rule says why, and speaks only when its readings are there."
@@ -107,6 +108,6 @@ function byPack(rules: readonly RuleSummary[], search: string): [string, RuleSum
 }
 
 function packInWords(pack: string): string {
-  const words = pack.replaceAll('-', ' ');
+  const words = pack.replaceAll('-plus', '+').replaceAll('-', ' ');
   return words.charAt(0).toUpperCase() + words.slice(1);
 }

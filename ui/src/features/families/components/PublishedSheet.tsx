@@ -23,7 +23,7 @@ export function PublishedSheet({ netlist }: { netlist: Netlist }) {
         Published values
       </h2>
       {points.length === 0 ? (
-        <Text>The service literature prints no values for this circuit.</Text>
+        <Text>No published values are recorded for this circuit.</Text>
       ) : (
         <>
           <div className={table.frame}>

@@ -88,10 +88,10 @@ export function effectInWords(effect: RuleEffect): { sentence: string; members: 
   if ('text' in effect) return { sentence: effect.text, members: [] };
   if (effect.effect === 'cause') {
     return {
-      sentence: `“${effect.name}” ties faults together; ${chanceInWords(effect.probability)} sets that come in for repair had it. Where it happened, each of these is so in:`,
+      sentence: `“${effect.name}” ties faults together. It happened to ${chanceInWords(effect.probability)} sets that come in for repair, and then left:`,
       members: effect.members.map(
         ({ parts, mode, probability }) =>
-          `${partsInWords(parts)}, ${FAULT_WORDS[mode]}: ${chanceInWords(probability)}`,
+          `${partsInWords(parts)}, ${FAULT_WORDS[mode]}, in ${chanceInWords(probability)} of them`,
       ),
     };
   }
