@@ -9,7 +9,7 @@ export const MOST_RESIDUAL = 1e-9;
 /** nerdamer and the numeric engine must agree to this fraction. */
 export const AGREEMENT = 1e-6;
 /** A voltage below this fraction of the largest one is compared with that size instead of its own. */
-const SMALL = 1e-6;
+const SMALL = 1e-3;
 
 /**
  * Expected node voltages from the nodal equations, solved by nerdamer, with the equations as a

@@ -11,7 +11,10 @@ import { applyAsFound } from '../netlist/as-found';
 import { requireSound } from '../netlist/require-sound';
 import type { Reading } from '../netlist/types';
 import { type Circuit, compileCircuit } from '../solver/circuit';
+import { healthyValues } from '../solver/branch-values';
+import { ColdNetwork } from '../solver/cold-network';
 import { settleMeter } from '../solver/meter';
+import { formatQuantity } from '../units';
 import { alternatingSystem, coldSystem, directSystem } from './system';
 
 type CircuitInput = Pick<DiagnosisInput, 'netlist' | 'asFound' | 'conditions'>;
@@ -67,6 +70,51 @@ function systemFor(circuit: Circuit, reading: Reading, a: string, b: string): No
   return { ...system, conductances: [...system.conductances, meter] };
 }
 
+/** True when the leads are joined through this part alone. */
+function isOnlyWay(system: NodalSystem, part: string, red: string, black: string): boolean {
+  const reached = new Set([red]);
+  for (let size = 0; size !== reached.size;) {
+    size = reached.size;
+    for (const { part: own, a, b } of system.conductances) {
+      if (own === part) continue;
+      if (reached.has(a)) reached.add(b);
+      else if (reached.has(b)) reached.add(a);
+    }
+  }
+  return !reached.has(black);
+}
+
+/** An ohmmeter whose whole current flows through the part: its ohms add to the rest. */
+function inSeries(
+  circuit: Circuit,
+  system: NodalSystem,
+  part: string,
+  measured: number,
+  red: string,
+  black: string,
+): Omit<ClosedForm, 'reading'> {
+  const own = 1 / system.conductances.find((branch) => branch.part === part)!.siemens;
+  const [a, b] = [circuit.nodeIndex.get(red)!, circuit.nodeIndex.get(black)!];
+  const cold = new ColdNetwork(circuit);
+  cold.solve(healthyValues(circuit).cold);
+  const volts = cold.response(a, b, new Float64Array(circuit.nodes.length));
+  const rest = Math.max(0, volts[a] - volts[b] - own);
+  const implied = measured - rest;
+  const figure = String(Number(rest.toPrecision(6)));
+  return {
+    part,
+    text: `ohms = ${figure} + ${part}`,
+    tex: `R = ${figure} + R_{\\mathrm{${part.replace(/_/g, '\\_')}}}`,
+    mathml: `<mrow><mi>R</mi><mo>=</mo><mn>${figure}</mn><mo>+</mo><msub><mi>R</mi><mtext>${part}</mtext></msub></mrow>`,
+    impliedValue: implied > 0 ? implied : null,
+    unit: 'ohms',
+    note:
+      implied > 0
+        ? `The whole current of the ohmmeter flows through ${part}: it would have to measure ${formatQuantity(implied, 'Ω')} to explain this reading alone.`
+        : `No ohms of ${part} alone would explain this reading: the rest of the way already has more.`,
+  };
+}
+
 /**
  * How one reading hangs on the ohms of one part, and what these would have to be to explain it.
  *
@@ -87,6 +135,9 @@ export function closedForm(input: CircuitInput & { part: string; reading: Readin
   if (!system) throw refuse('This kind of reading has no closed form. Choose ohms or volts.');
   if (!system.conductances.some((branch) => branch.part === part)) {
     throw refuse(`${part} has no resistance that this reading could tell. Choose another part.`);
+  }
+  if (reading.take === 'ohms' && isOnlyWay(system, part, a, b)) {
+    return { ...inSeries(circuit, system, part, reading.value, a, b), reading };
   }
   return { ...closedFormOf(system, part, { a, b }, reading.value), reading };
 }
