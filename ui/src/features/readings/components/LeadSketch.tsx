@@ -43,7 +43,7 @@ export function LeadSketch({ netlist, place }: LeadSketchProps) {
       {place.take === 'lifted-ohms' && (
         <p className={styles.series}>Lift one end of {place.part} first, then measure across it.</p>
       )}
-      <dl className={styles.root}>
+      <div className={styles.root}>
         {(['red', 'black'] as const).map((colour, index) => (
           <div key={colour} className={styles.lead}>
             <svg className={`${styles.svg} ${styles[colour]}`} width={30} height={44} aria-hidden>
@@ -52,14 +52,12 @@ export function LeadSketch({ netlist, place }: LeadSketchProps) {
               <path d="M8 32V43" className={styles.tip} strokeWidth={2} />
             </svg>
             <div>
-              <dt className={styles.term}>{colour === 'red' ? 'Red lead' : 'Black lead'}</dt>
-              <dd className={styles.where} style={{ margin: 0 }}>
-                {leads[index]}
-              </dd>
+              <span className={styles.term}>{colour === 'red' ? 'Red lead' : 'Black lead'}</span>
+              <span className={styles.where}>{leads[index]}</span>
             </div>
           </div>
         ))}
-      </dl>
+      </div>
     </>
   );
 }
