@@ -26,6 +26,7 @@ const SCREENS: [path: string, heading: RegExp, filled: RegExp][] = [
   ['/families', /^Families$/, /solved case/],
   ['/families/1', /./, /Versions of the circuit/],
   ['/rules', /^Rules$/, /Because/],
+  ['/rules/surge-at-switch-on', /surge/, /When it speaks/],
   ['/parts-data', /^Parts data$/, /of \d+/],
   ['/people', /^People$/, /This is you/],
   ['/nowhere', /^Nothing here$/, /leads nowhere/],

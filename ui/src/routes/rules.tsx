@@ -11,7 +11,7 @@ import { RuleCard } from '@/features/rules/components/RuleCard';
 import { type RuleSummary } from '@/lib/api-model';
 
 const useStyles = makeStyles({
-  search: { maxWidth: '420px', marginBottom: tokens.spacingVerticalXL },
+  search: { width: 'min(100%, 420px)', marginBottom: tokens.spacingVerticalXL },
   box: { width: '100%', maxWidth: 'none' },
   pack: {
     margin: `${tokens.spacingVerticalXXL} 0 ${tokens.spacingVerticalM}`,

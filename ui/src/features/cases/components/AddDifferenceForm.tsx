@@ -14,7 +14,7 @@ import {
 const useStyles = makeStyles({
   root: {
     display: 'grid',
-    gridTemplateColumns: 'repeat(auto-fill, minmax(min(100%, 200px), 1fr))',
+    gridTemplateColumns: 'repeat(auto-fill, minmax(min(100%, 260px), 1fr))',
     alignItems: 'start',
     gap: tokens.spacingHorizontalM,
   },

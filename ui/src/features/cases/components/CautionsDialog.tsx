@@ -28,6 +28,7 @@ const useStyles = makeStyles({
     paddingLeft: '22px',
   },
   title: { display: 'block' },
+  button: { whiteSpace: 'nowrap' },
   codes: {
     padding: tokens.spacingHorizontalM,
     borderLeft: `4px solid ${tokens.colorPaletteDarkOrangeBorderActive}`,
@@ -69,12 +70,13 @@ export function CautionsDialog({ caseId, set, netlist, onClose }: CautionsDialog
             />
           </DialogContent>
           <DialogActions>
-            <Button size="large" onClick={() => leave()}>
+            <Button size="large" className={styles.button} onClick={() => leave()}>
               Stay with cold readings
             </Button>
             <Button
               appearance="primary"
               size="large"
+              className={styles.button}
               disabled={acknowledge.isPending}
               onClick={() => acknowledge.mutate(undefined, { onSuccess: () => leave() })}
             >
