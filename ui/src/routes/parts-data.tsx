@@ -102,10 +102,18 @@ export function Component() {
             <Text role="status">
               {offset + 1} to {last} of {total}
             </Text>
-            <Button disabled={offset === 0} onClick={() => setOffset(offset - PARTS_PAGE)}>
+            <Button
+              size="large"
+              disabled={offset === 0}
+              onClick={() => setOffset(offset - PARTS_PAGE)}
+            >
               Earlier ones
             </Button>
-            <Button disabled={last >= total} onClick={() => setOffset(offset + PARTS_PAGE)}>
+            <Button
+              size="large"
+              disabled={last >= total}
+              onClick={() => setOffset(offset + PARTS_PAGE)}
+            >
               Later ones
             </Button>
           </div>

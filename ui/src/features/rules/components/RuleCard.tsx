@@ -2,6 +2,7 @@ import { makeStyles, Text, tokens } from '@fluentui/react-components';
 import { Link } from 'react-router-dom';
 import { StatusBadge } from '@/components/StatusBadge';
 import { type RuleSummary } from '@/lib/api-model';
+import { atMost, extraTokens } from '@/theme/extra-tokens';
 
 const useStyles = makeStyles({
   card: {
@@ -26,6 +27,12 @@ const useStyles = makeStyles({
     color: tokens.colorBrandForegroundLink,
     textDecoration: 'none',
     ':hover': { textDecoration: 'underline' },
+    // A thumb needs more height than a line of text has.
+    [atMost.phone]: {
+      display: 'inline-flex',
+      alignItems: 'center',
+      minHeight: extraTokens.touchHeight,
+    },
   },
   sentence: { maxWidth: '68ch' },
   quiet: { color: tokens.colorNeutralForeground3, maxWidth: '68ch' },
