@@ -6,7 +6,7 @@ import type { Scorer } from './scorer';
 
 /** Posterior of one atom's cells inside a set: which value it has. */
 export interface CellPosterior {
-  cells: AtomCell[];
+  cells: readonly AtomCell[];
   /** ln of share × likelihood, one per cell. */
   logs: number[];
 }
@@ -60,6 +60,30 @@ export function scanCells(
   return best < 0 || !like ? null : { logs, best, like };
 }
 
+/** Ratings within this distance in ln of volts and of amps of the best coarse one are looked at. */
+const NEAR_RATING = 0.45;
+
+/**
+ * Cells worth scanning for one fault among several. There are some sixty ratings a heater could
+ * have: a coarse look first, then only those around the best. Other modes keep all their cells.
+ */
+function nearCells(
+  scorer: Scorer,
+  faults: readonly SettledFault[],
+  slot: number,
+  atom: Atom,
+): readonly AtomCell[] {
+  if (atom.mode !== 'wrong-type' || atom.cells.length < 20) return atom.cells;
+  const scan = scanCells(scorer, faults, slot, atom.coarse);
+  if (!scan) return atom.cells;
+  const { volts = 1, amps = 1 } = atom.coarse[scan.best].fault;
+  return atom.cells.filter(
+    ({ fault }) =>
+      Math.abs(Math.log(fault.volts! / volts)) <= NEAR_RATING &&
+      Math.abs(Math.log(fault.amps! / amps)) <= NEAR_RATING,
+  );
+}
+
 /**
  * Marginal likelihood of a set over the unknown values of its faults. One unknown is summed over
  * its cells exactly; several are taken as separable around the best point, found by going round
@@ -80,11 +104,13 @@ export function scoreSet(
   for (let round = 0; round < rounds; round += 1) {
     cells = [];
     for (let slot = 0; slot < atoms.length; slot += 1) {
-      const scan = scanCells(scorer, faults, slot, atoms[slot].cells);
+      const own =
+        atoms.length > 1 ? nearCells(scorer, faults, slot, atoms[slot]) : atoms[slot].cells;
+      const scan = scanCells(scorer, faults, slot, own);
       if (!scan) return null;
-      faults[slot] = atoms[slot].cells[scan.best].fault;
+      faults[slot] = own[scan.best].fault;
       like = scan.like;
-      cells.push({ cells: atoms[slot].cells, logs: scan.logs });
+      cells.push({ cells: own, logs: scan.logs });
     }
   }
   if (!like) return null;
