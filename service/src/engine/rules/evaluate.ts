@@ -1,52 +1,17 @@
 import { Engine } from 'json-rules-engine';
 import type { DiagnosisInput } from '../diagnosis-types';
-import { modesOf } from '../faults/modes';
 import { applyAsFound } from '../netlist/as-found';
-import type { Part } from '../netlist/types';
+import { checkNetlist } from '../netlist/checks';
+import type { Netlist, Part } from '../netlist/types';
+import { compileCircuit } from '../solver/circuit';
+import { operatingPoint } from '../solver/operating-point';
+import { caseFacts, sectionsOf } from './case-facts';
 import { checkRule } from './check';
-import { caseFacts, FACTS, type FactValues, partFacts } from './facts';
-import { selectParts } from './select';
+import { applyEffects } from './effects';
+import { factNamed, type FactValues } from './facts';
+import { partFacts } from './part-facts';
+import { type JudgedCondition, leavesOf, truthOf } from './truth';
 import type { Condition, Rule, RulesOutcome } from './types';
-
-/** What a rule comes to: unknown is not false. */
-type Truth = 'yes' | 'no' | 'unknown';
-
-/** A condition with its outcome, as json-rules-engine hands it back. */
-interface JudgedCondition {
-  fact?: string;
-  factResult?: unknown;
-  result?: boolean;
-  all?: JudgedCondition[];
-  any?: JudgedCondition[];
-  not?: JudgedCondition;
-}
-
-/** Folds a judged tree in three-valued logic (S. C. Kleene, Introduction to Metamathematics, 1952, §64). */
-function truthOf(condition: JudgedCondition): Truth {
-  if (condition.not) {
-    const inner = truthOf(condition.not);
-    return inner === 'unknown' ? inner : inner === 'yes' ? 'no' : 'yes';
-  }
-  const list = condition.all ?? condition.any;
-  if (list) {
-    const truths = list.map(truthOf);
-    const [deciding, otherwise] = condition.all
-      ? (['no', 'yes'] as const)
-      : (['yes', 'no'] as const);
-    if (truths.includes(deciding)) return deciding;
-    return truths.includes('unknown') ? 'unknown' : otherwise;
-  }
-  if (condition.factResult === undefined) return 'unknown';
-  return condition.result ? 'yes' : 'no';
-}
-
-/** Comparisons of a judged tree with the values they saw. */
-function leavesOf(condition: JudgedCondition): { fact: string; value: unknown }[] {
-  if (condition.not) return leavesOf(condition.not);
-  const list = condition.all ?? condition.any;
-  if (list) return list.flatMap(leavesOf);
-  return [{ fact: condition.fact!, value: condition.factResult }];
-}
 
 /** Facts named in a rule's conditions. */
 function factsIn(condition: Condition): string[] {
@@ -56,17 +21,16 @@ function factsIn(condition: Condition): string[] {
   return [condition.fact];
 }
 
-/** A rule made ready: one engine, run once for the case or once per part. */
+/** A rule made ready: one engine, run once for the case, or once per part or body. */
 interface PreparedRule {
-  rule: Rule;
   engine: Engine;
-  facts: string[];
+  facts: Set<string>;
 }
 
-function prepare(rule: Rule): PreparedRule {
+function prepare({ id, when }: Rule): PreparedRule {
   const engine = new Engine([], { allowUndefinedFacts: true });
-  engine.addRule({ conditions: rule.when as never, event: { type: rule.id } });
-  return { rule, engine, facts: [...new Set(factsIn(rule.when))] };
+  engine.addRule({ conditions: when as never, event: { type: id } });
+  return { engine, facts: new Set(factsIn(when)) };
 }
 
 async function judge(
@@ -81,66 +45,46 @@ async function judge(
   return JSON.parse(result.toJSON()!).conditions as JudgedCondition;
 }
 
-/** Adds a fired rule's effects to the outcome. */
-function applyEffects(
-  rule: Rule,
-  parts: readonly Part[],
-  at: Part | undefined,
-  outcome: RulesOutcome,
-): void {
-  for (const effect of rule.then) {
-    switch (effect.effect) {
-      case 'advice':
-      case 'caution':
-        if (!outcome.advice.some((said) => said.rule === rule.id && said.text === effect.text)) {
-          outcome.advice.push({
-            rule: rule.id,
-            effect: effect.effect,
-            text: effect.text,
-            because: rule.because,
-          });
-        }
-        break;
-      case 'cause': {
-        const members = effect.members.flatMap(({ parts: selector, mode, probability }) =>
-          selectParts(parts, selector, at)
-            .filter((part) => modesOf(part).includes(mode))
-            .map(({ ref }) => ({ part: ref, mode, probability })),
-        );
-        if (members.length < 2) break;
-        const { name, probability } = effect;
-        outcome.causes.push({ name, rule: rule.id, because: rule.because, probability, members });
-        break;
-      }
-      default: {
-        const factor = effect.effect === 'speaks-for' ? effect.factor : 1 / effect.factor;
-        for (const part of selectParts(parts, effect.parts, at)) {
-          if (!modesOf(part).includes(effect.mode)) continue;
-          outcome.factors.push({
-            part: part.ref,
-            mode: effect.mode,
-            factor,
-            rule: rule.id,
-            because: rule.because,
-          });
-        }
-      }
-    }
-  }
+/** Where a rule is asked: once, once per part, or once per body with its first section at hand. */
+function placesOf({ about }: Rule, netlist: Netlist): (Part | undefined)[] {
+  if (about.scope === 'case') return [undefined];
+  const parts = netlist.parts.filter(({ kind }) => !about.kind || about.kind.includes(kind));
+  if (about.scope === 'each-part') return parts;
+  return parts.filter(
+    (part, i) =>
+      sectionsOf(netlist, part) > 1 &&
+      parts.findIndex(({ assembly }) => assembly === part.assembly) === i,
+  );
 }
 
 /** The first thing a rule waits for, in words. */
 function waitWords(condition: JudgedCondition, at: Part | undefined): string {
   const missing = leavesOf(condition).find(({ value }) => value === undefined);
-  const what = FACTS[missing?.fact ?? '']?.waitsFor ?? 'something not known yet';
-  return at ? `${what.replace(/\bit\b/, at.ref).replace(/\bits\b/, `${at.ref}’s`)}` : what;
+  const what = factNamed(missing?.fact)?.waitsFor ?? 'something not known yet';
+  return at ? what.replace(/\bit\b/, at.ref).replace(/\bits\b/, `${at.ref}’s`) : what;
+}
+
+/** Watts of each part in the healthy set; solved when first asked for, and only if it can be. */
+function lazyWatts(
+  netlist: Netlist,
+  lineVolts: number | undefined,
+): (ref: string) => number | undefined {
+  let parts: Record<string, { watts: number }> | undefined;
+  return (ref) => {
+    parts ??=
+      checkNetlist(netlist).length === 0
+        ? operatingPoint(compileCircuit(netlist, lineVolts)).parts
+        : {};
+    return parts[ref]?.watts;
+  };
 }
 
 /**
  * Evaluates all rules on a case. A condition on something not yet known neither fires nor blocks:
- * the rule is listed as waiting.
+ * the rule is listed as waiting. Rules never see one another's effects.
  *
- * @param input the case; its `knowledge.rules` are rules that `checkRule` accepts, others are left out.
+ * @param input the case; of its `knowledge.rules` those count that `checkRule` accepts.
+ * @throws NetlistError when what was found does not fit the circuit.
  */
 export async function evaluateRules(input: DiagnosisInput): Promise<RulesOutcome> {
   const outcome: RulesOutcome = { factors: [], causes: [], advice: [], waiting: [], fired: [] };
@@ -148,27 +92,22 @@ export async function evaluateRules(input: DiagnosisInput): Promise<RulesOutcome
     (rule) => checkRule(rule).length === 0,
   ) as Rule[];
   if (rules.length === 0) return outcome;
-  const found = { ...input, netlist: applyAsFound(input.netlist, input.asFound ?? []) };
-  const { parts } = found.netlist;
+  const netlist = applyAsFound(input.netlist, input.asFound ?? []);
+  const found = { ...input, netlist };
   const ofCase = caseFacts(found);
+  const watts = lazyWatts(netlist, input.conditions?.lineVolts);
   for (const rule of rules) {
     const prepared = prepare(rule);
-    const { about } = rule;
-    const places: (Part | undefined)[] =
-      about.scope === 'case'
-        ? [undefined]
-        : parts.filter(({ kind }) => !about.kind || about.kind.includes(kind));
+    const wattsIfAsked = prepared.facts.has('wattsRatio') ? watts : () => undefined;
     let isWaiting = false;
-    for (const at of places) {
-      const judged = await judge(prepared, at ? { ...ofCase, ...partFacts(found, at) } : ofCase);
+    for (const at of placesOf(rule, netlist)) {
+      const ofPart = at ? partFacts(found, at, wattsIfAsked) : {};
+      const judged = await judge(prepared, { ...ofCase, ...ofPart });
       const truth = truthOf(judged);
       if (truth === 'yes') {
-        outcome.fired.push({
-          rule: rule.id,
-          ...(at ? { part: at.ref } : {}),
-          seen: leavesOf(judged),
-        });
-        applyEffects(rule, parts, at, outcome);
+        const where = at ? { part: at.ref } : {};
+        outcome.fired.push({ rule: rule.id, ...where, seen: leavesOf(judged) });
+        applyEffects(rule, netlist, at, outcome);
       } else if (truth === 'unknown' && !isWaiting) {
         // One line per rule is enough: a long string would fill the page.
         isWaiting = true;

@@ -1,4 +1,5 @@
-export { checkRule, OPERATORS } from './check';
+export { checkRule } from './check';
+export { OPERATORS } from './check-conditions';
 export { evaluateRules } from './evaluate';
 export { FACTS, type FactDefinition } from './facts';
 export type { Rule, RulesOutcome } from './types';

@@ -17,11 +17,13 @@ export interface PartSelector {
   kind?: PartKind[];
   make?: string[];
   ref?: string;
-  /** `same`: sections of the body of the part at hand. */
+  /** `same`: sections of the body of the part at hand; `any`: sections of whatever body. */
   assembly?: 'same' | 'any';
   isPictureTube?: boolean;
   /** The part at hand (rules about each part). */
   isThis?: boolean;
+  /** Lies between the same two nodes as the part at hand (rules about each part). */
+  isAcrossThis?: boolean;
   /** Lies in the heater string: in series with heaters between the line's two sides. */
   isInString?: boolean;
 }
@@ -48,7 +50,8 @@ export interface Rule {
   name: string;
   /** The whole rule as a sentence for a person. */
   sentence: string;
-  about: { scope: 'case' } | { scope: 'each-part'; kind?: PartKind[] };
+  /** Asked once, once for every part, or once for every body of several sections. */
+  about: { scope: 'case' } | { scope: 'each-part' | 'each-body'; kind?: PartKind[] };
   when: Conditions;
   then: Effect[];
   because: string;
