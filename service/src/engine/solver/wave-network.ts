@@ -17,6 +17,8 @@ export interface WaveSolution {
   state: SteadyState;
   /** Element of each branch, −1 for branches that are not part of it. */
   element: Int32Array;
+  /** Element of the line's source, −1 when the block does not touch the line. */
+  line: number;
 }
 
 /**
@@ -78,15 +80,17 @@ export class WaveNetwork {
       const made = this.elementOf(values, k, leaks);
       if (made) element[k] = elements.push(made) - 1;
     }
+    let source = -1;
     if (this.hasLine) {
-      elements.push({
-        kind: 'source',
-        a: this.row[circuit.hot],
-        b: this.row[circuit.return],
-        volts: circuit.lineVolts * line,
-        phase: 0,
-        ohms: 0,
-      });
+      source =
+        elements.push({
+          kind: 'source',
+          a: this.row[circuit.hot],
+          b: this.row[circuit.return],
+          volts: circuit.lineVolts * line,
+          phase: 0,
+          ohms: 0,
+        }) - 1;
     }
     elements.push(...leaks);
     if (meter) {
@@ -96,7 +100,7 @@ export class WaveNetwork {
     const state = solveSteadyState(elements, this.count, circuit.hertz, { start: this.warm });
     if (!state.converged) return null;
     this.warm ??= state.warmStart;
-    return { state, element };
+    return { state, element, line: source };
   }
 
   /** A branch as the solver takes it; leaks across it go into a list of their own. */

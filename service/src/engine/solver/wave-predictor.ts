@@ -8,12 +8,10 @@ import { Law } from './laws';
 import type { Predictions } from './predictor';
 import type { ReadingSpec } from './reading-spec';
 import { WaveNetwork, type WaveSolution } from './wave-network';
-import { perturb } from './wave-perturb';
+import { waveSensitivities } from './wave-sensitivities';
 
 /** Solutions kept per case; each holds one number per reading. */
 const MOST_KEPT = 20000;
-/** Finite-difference step, in standard deviations of the parameter. */
-const STEP = 0.5;
 /** A meter that pulls its node down by more than this factor is solved as part of the circuit. */
 const MUCH_LOADED = 1.3;
 /** A rail that fell below this share of its healthy value shows only millivolts of no meaning. */
@@ -34,7 +32,6 @@ export class WavePredictor {
   private readonly loading: ColdNetwork;
   private readonly healthy: BranchValues;
   private readonly scratch: BranchValues;
-  private readonly moved: BranchValues;
   private readonly adjoint: Float64Array;
   private readonly lists = new WeakMap<readonly ReadingSpec[], ReadingList>();
   private list: ReadingList = newList([], []);
@@ -44,7 +41,6 @@ export class WavePredictor {
     this.loading = new ColdNetwork(circuit);
     this.healthy = healthyValues(circuit);
     this.scratch = blankValues(circuit.branches.length);
-    this.moved = blankValues(circuit.branches.length);
     this.adjoint = new Float64Array(circuit.nodes.length);
   }
 
@@ -93,9 +89,9 @@ export class WavePredictor {
     const { circuit } = this;
     const width = circuit.parameters.length;
     const key = keyOf(own);
-    if (isExact && !known.has(key)) known.set(key, this.differences(own, means));
+    if (isExact && !known.has(key)) known.set(key, this.slopes(own, means));
     const exact = known.get(key);
-    if (!known.has('')) known.set('', this.differences([], base));
+    if (!known.has('')) known.set('', this.slopes([], base));
     const reference = known.get('')!;
     rows.forEach((r, i) => {
       out.mean[r] = means[i];
@@ -267,21 +263,23 @@ export class WavePredictor {
     });
   }
 
-  /** Change of every reading per unit of every parameter, by finite differences. */
-  private differences(faults: readonly SettledFault[], base: Means): Float64Array {
-    const { circuit } = this;
-    const width = circuit.parameters.length;
-    const out = new Float64Array(this.list.rows.length * width);
+  /**
+   * Change of every reading per relative change of every parameter, at one hypothesis. A meter that
+   * pulls its node down takes the change down with it.
+   */
+  private slopes(faults: readonly SettledFault[], means: Means): Float64Array {
+    const { circuit, network, list } = this;
     const values = applyFaults(this.healthy, circuit, faults);
-    circuit.parameters.forEach((parameter, p) => {
-      const by = STEP * parameter.sigma;
-      const { line, isMoved } = perturb(circuit, values, parameter, by, this.moved);
-      if (!isMoved) return;
-      const moved = this.measure(this.moved, line);
-      if (!moved) return;
-      this.list.rows.forEach((_, i) => {
-        out[i * width + p] = (moved[i] - base[i]) / by;
-      });
+    const width = circuit.parameters.length;
+    const solution = network.solve(values);
+    this.solved += 1;
+    if (!solution) return new Float64Array(list.rows.length * width);
+    const specs = list.rows.map((r) => list.specs[r]);
+    const out = waveSensitivities(circuit, network, values, solution, specs);
+    specs.forEach((spec, i) => {
+      const open = readMeter(network, solution, spec, circuit);
+      const factor = Math.abs(open) > 1e-6 ? means[i] / open : 1;
+      for (let p = 0; p < width; p += 1) out[i * width + p] *= factor;
     });
     return out;
   }
