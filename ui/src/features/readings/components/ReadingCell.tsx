@@ -32,8 +32,7 @@ const useStyles = makeStyles({
     minWidth: '92px',
     height: '34px',
     padding: `0 ${tokens.spacingHorizontalS}`,
-    border: `1px solid transparent`,
-    borderBottomColor: tokens.colorNeutralStroke2,
+    border: `1px solid ${tokens.colorNeutralStroke2}`,
     borderRadius: tokens.borderRadiusMedium,
     backgroundColor: 'transparent',
     color: tokens.colorNeutralForeground1,
@@ -55,7 +54,7 @@ const useStyles = makeStyles({
   },
   pending: { fontStyle: 'italic' },
   wrong: { border: `2px solid ${tokens.colorStatusDangerBorder2}` },
-  readOnly: { borderBottomColor: 'transparent', cursor: 'default' },
+  readOnly: { border: '1px solid transparent', cursor: 'default' },
   error: {
     margin: 0,
     padding: `${tokens.spacingVerticalXXS} ${tokens.spacingHorizontalXXS}`,
