@@ -6,12 +6,13 @@ import { AppModule } from './app.module';
 import { describeApi, serveUi, setUp } from './app-setup';
 import { PinoLogger } from './common/pino-logger';
 import { requestLog } from './common/request-log';
-import { readSettings, SettingsError } from './config/settings';
+import { loadEnvFile, readSettings, SettingsError } from './config/settings';
 import { DEMO_PEOPLE } from './database/seed/demo-people';
 import { SeedService } from './database/seed/seed.service';
 
 /** Starts the whole product on one port. */
 async function start(): Promise<void> {
+  loadEnvFile();
   const { port, seed } = readSettings(process.env);
   const app = await NestFactory.create<NestExpressApplication>(AppModule, {
     logger: new PinoLogger(),

@@ -28,6 +28,12 @@ function findRoot(from: string): string {
   return folder;
 }
 
+/** Takes what stands in a .env file at the top of the checkout; the environment itself goes first. */
+export function loadEnvFile(): void {
+  const file = join(PROJECT_ROOT, '.env');
+  if (existsSync(file)) process.loadEnvFile(file);
+}
+
 /** Settings that cannot be used; every one is named. */
 export class SettingsError extends Error {
   constructor(readonly problems: string[]) {
