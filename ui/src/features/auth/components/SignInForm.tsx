@@ -8,13 +8,19 @@ import { showProblem } from '@/lib/form-problems';
 import { type SignInInput, signInSchema, useSignIn } from '../api/sign-in';
 import { useFormStyles } from './form-styles';
 
+interface SignInFormProps {
+  /** Address of the person who was here, when it is known. */
+  email?: string;
+  onSignedIn: (signedIn: SignedIn) => void;
+}
+
 /** E-mail address and password. */
-export function SignInForm({ onSignedIn }: { onSignedIn: (signedIn: SignedIn) => void }) {
+export function SignInForm({ email = '', onSignedIn }: SignInFormProps) {
   const styles = useFormStyles();
   const signIn = useSignIn();
   const { control, handleSubmit, setError, formState } = useForm<SignInInput>({
     resolver: zodResolver(signInSchema),
-    defaultValues: { email: '', password: '' },
+    defaultValues: { email, password: '' },
   });
   const send = handleSubmit((input) =>
     signIn.mutateAsync(input).then(onSignedIn, (error: unknown) => {

@@ -1,5 +1,5 @@
 import { type Netlist } from '@engine/netlist/types';
-import { makeStyles, tokens } from '@fluentui/react-components';
+import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
 import { labelForNode, type Place } from '@/lib/bench/places';
 
 interface LeadSketchProps {
@@ -13,6 +13,8 @@ const useStyles = makeStyles({
     gridTemplateColumns: '1fr 1fr',
     gap: tokens.spacingHorizontalM,
     margin: 0,
+    padding: 0,
+    listStyleType: 'none',
   },
   lead: { display: 'flex', alignItems: 'center', gap: tokens.spacingHorizontalS, minWidth: 0 },
   svg: { flexShrink: 0, overflow: 'visible' },
@@ -43,21 +45,26 @@ export function LeadSketch({ netlist, place }: LeadSketchProps) {
       {place.take === 'lifted-ohms' && (
         <p className={styles.series}>Lift one end of {place.part} first, then measure across it.</p>
       )}
-      <div className={styles.root}>
+      <ul className={styles.root} aria-label="Leads">
         {(['red', 'black'] as const).map((colour, index) => (
-          <div key={colour} className={styles.lead}>
-            <svg className={`${styles.svg} ${styles[colour]}`} width={30} height={44} aria-hidden>
+          <li key={colour} className={styles.lead}>
+            <svg
+              className={mergeClasses(styles.svg, styles[colour])}
+              width={30}
+              height={44}
+              aria-hidden
+            >
               <path d="M15 0C15 5 8 6 8 12" fill="none" stroke="currentColor" strokeWidth={3} />
               <path d="M4 12H12L11 32H5Z" fill="currentColor" />
               <path d="M8 32V43" className={styles.tip} strokeWidth={2} />
             </svg>
-            <div>
+            <span>
               <span className={styles.term}>{colour === 'red' ? 'Red lead' : 'Black lead'}</span>
               <span className={styles.where}>{leads[index]}</span>
-            </div>
-          </div>
+            </span>
+          </li>
         ))}
-      </div>
+      </ul>
     </>
   );
 }

@@ -8,6 +8,7 @@ import { type CaseReading } from '@/lib/bench/case-reading';
 import { type Place } from '@/lib/bench/places';
 import { problemInWords } from '@/lib/bench/problem';
 import { useDiagnosis } from '../api/get-diagnosis';
+import { ruleInWords } from '../words/suspect-words';
 import { DiagnosisAdvice, DiagnosisRemarks } from './DiagnosisRemarks';
 import { NextReadings } from './NextReadings';
 import { PartChances } from './PartChances';
@@ -112,7 +113,7 @@ export function SuspectsPanel(props: SuspectsPanelProps) {
           <ul className={styles.list}>
             {result.waiting.map(({ rule, for: wanted }) => (
               <li key={`${rule} ${wanted}`}>
-                {rule}: {wanted}
+                {ruleInWords(rule)}: {wanted}
               </li>
             ))}
           </ul>

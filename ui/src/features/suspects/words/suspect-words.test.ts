@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import {
   groupsOf,
   neededValueInWords,
+  ruleInWords,
   separatorsOf,
   speaksInWords,
   wouldShowInWords,
@@ -47,6 +48,10 @@ describe('groups of suspects', () => {
 });
 
 describe('words of a suspect', () => {
+  it('name a rule without its hyphens', () => {
+    expect(ruleInWords('lamp-reads-well-cold')).toBe('Lamp reads well cold');
+  });
+
   it('give the value it would need with its interval', () => {
     const fault = { part: 'R1', mode: 'high' as const };
     expect(

@@ -117,3 +117,9 @@ export function ruleEffectInWords(voice: Suspect['rules'][number]): string {
   const verb = voice.effect === 'speaks-for' ? 'speaks for it' : 'speaks against it';
   return voice.factor === undefined ? verb : `${verb}: ${timesInWords(voice.factor)}`;
 }
+
+/** Names a rule by the words of its id: "lamp-reads-well-cold" is "Lamp reads well cold". */
+export function ruleInWords(rule: string): string {
+  const words = (rule.split('/').pop() ?? rule).replaceAll('-', ' ');
+  return words.charAt(0).toUpperCase() + words.slice(1);
+}

@@ -37,6 +37,7 @@ const useStyles = makeStyles({
   },
   field: { flexBasis: '200px', flexGrow: 1, maxWidth: '360px' },
   button: { '@media (pointer: coarse)': { minHeight: '44px' } },
+  scroll: { overflowX: 'auto' },
   implied: {
     display: 'block',
     fontSize: tokens.fontSizeBase500,
@@ -112,7 +113,9 @@ export function ClosedFormForm({ caseId, netlist, readings, part }: ClosedFormFo
               : `${answer.part} would have to be ${formatQuantity(answer.impliedValue, 'Ω')}.`}
           </Text>
           {marked && partValue(marked) && <Text block>It is marked {partValue(marked)}.</Text>}
-          <MathLine text={answer.text} mathml={answer.mathml} />
+          <div className={styles.scroll} role="group" aria-label="Formula" tabIndex={0}>
+            <MathLine text={answer.text} mathml={answer.mathml} />
+          </div>
           {answer.note && <Text block>{answer.note}</Text>}
         </div>
       )}

@@ -14,8 +14,6 @@ interface MathLineProps {
 const useStyles = makeStyles({
   root: {
     padding: `${tokens.spacingVerticalS} 0`,
-    overflowX: 'auto',
-    overflowY: 'hidden',
     fontSize: tokens.fontSizeBase400,
   },
   text: {

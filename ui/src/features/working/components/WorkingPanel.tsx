@@ -38,9 +38,11 @@ const useStyles = makeStyles({
   equations: {
     margin: 0,
     display: 'grid',
-    gridTemplateColumns: 'minmax(90px, auto) minmax(0, 1fr)',
+    gridTemplateColumns: 'minmax(90px, auto) auto',
     alignItems: 'center',
+    justifyContent: 'start',
   },
+  scroll: { overflowX: 'auto' },
   node: {
     paddingRight: tokens.spacingHorizontalM,
     color: tokens.colorNeutralForeground3,
@@ -92,16 +94,18 @@ export function WorkingPanel({ caseId, netlist, readings, caseVersion, part }: W
             This circuit needs no equation: every node is tied to the line or the reference.
           </Text>
         ) : (
-          <dl className={styles.equations}>
-            {working.equations.map(({ node, text, mathml }, index) => (
-              <Equation
-                key={`${node} ${index}`}
-                node={labelForNode(netlist, node)}
-                text={text}
-                mathml={mathml}
-              />
-            ))}
-          </dl>
+          <div className={styles.scroll} role="group" aria-label="All equations" tabIndex={0}>
+            <dl className={styles.equations}>
+              {working.equations.map(({ node, text, mathml }, index) => (
+                <Equation
+                  key={`${node} ${index}`}
+                  node={labelForNode(netlist, node)}
+                  text={text}
+                  mathml={mathml}
+                />
+              ))}
+            </dl>
+          </div>
         )}
       </section>
       {solution.length > 0 && (

@@ -38,8 +38,9 @@ function readElement(element: Element): MarkupNode | null {
   const children: MarkupNode[] = [];
   for (const child of element.childNodes) {
     if (child.nodeType === Node.TEXT_NODE) {
-      const text = child.textContent?.trim();
-      if (text) children.push(text);
+      // A space before a unit is meant; one between elements is layout.
+      const text = child.textContent ?? '';
+      if (text.trim() !== '') children.push(text);
     } else if (child.nodeType === Node.ELEMENT_NODE) {
       const inner = readElement(child as Element);
       if (inner === null) return null;
