@@ -65,6 +65,11 @@ describe('the schema and the book of facts', () => {
     for (const list of lists) expect([...list].sort()).toEqual([...words].sort());
   });
 
+  it('are shown in the README by a rule that passes', () => {
+    const [, example] = /```json\n([\s\S]*?)```/.exec(read('README.md'))!;
+    expect(checkRule(JSON.parse(example))).toEqual([]);
+  });
+
   it('name every fact with its unit in the README', () => {
     const readme = read('README.md');
     for (const [name, { unit }] of Object.entries(FACTS)) {
