@@ -110,7 +110,7 @@ export function diagnoseWith(input: DiagnosisInput, outcome: RulesOutcome): Diag
     suspects,
     parts: partProbabilities(
       ranked,
-      circuit.parts.map(({ ref }) => ref),
+      netlist.parts.map(({ ref }) => ref),
     ),
     nextReadings,
     expected: expectedOf(input, scorer, healthyViews),

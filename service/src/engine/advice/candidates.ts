@@ -51,7 +51,8 @@ export function listCandidates(
     }
     add({ take: 'ohms', at: [node, black], minutes: MINUTES.cold });
   }
-  parts.forEach((part, k) => {
+  netlist.parts.forEach((_, k) => {
+    const part = parts[k];
     const { ref } = part;
     if (isPowered && circuit.isSteady[k]) {
       add({ take: 'ac-volts', part: ref, minutes: MINUTES.across });

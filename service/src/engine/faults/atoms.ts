@@ -58,7 +58,8 @@ export function listAtoms(
   lamps: readonly { volts: number; amps: number }[],
 ): Atom[] {
   const atoms: Atom[] = [];
-  circuit.parts.forEach((part, index) => {
+  circuit.netlist.parts.forEach((_, index) => {
+    const part = circuit.parts[index];
     for (const mode of modesOf(part)) {
       const chance = odds(part, mode);
       if (!(chance > 0)) continue;

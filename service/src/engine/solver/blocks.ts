@@ -18,7 +18,8 @@ function rootOf(parent: Int32Array, node: number): number {
  * Splits a circuit at the terminals of an ideal line source into blocks that cannot influence each
  * other, and says for each branch whether its block can be solved with RMS values alone.
  *
- * @param lineOhms with a source resistance the terminals couple everything: there is one block.
+ * @param hot node of the ideal source; with a source resistance it lies behind that, and what hangs
+ *   on the line is one block.
  * @returns 1 for a branch of resistances and hot parts only, 0 for one whose block holds a
  *   rectifier, a reactance, a winding or a load.
  */
@@ -28,9 +29,8 @@ export function splitBlocks(
   nodes: number,
   hot: number,
   back: number,
-  lineOhms: number,
 ): Uint8Array {
-  const isTerminal = (node: number) => lineOhms === 0 && (node === hot || node === back);
+  const isTerminal = (node: number) => node === hot || node === back;
   const parent = Int32Array.from({ length: nodes }, (_, i) => i);
   for (const branch of branches) {
     if (branch.isLeak || isTerminal(branch.a) || isTerminal(branch.b)) continue;

@@ -24,7 +24,7 @@ export interface Branch {
 /** A checked netlist with nodes and parts as integers; made once and shared by all hypotheses. */
 export interface Circuit {
   netlist: Netlist;
-  /** Parts with every default filled in. */
+  /** Parts with every default filled in; the line's source resistance, if any, comes last. */
   parts: Part[];
   partIndex: Map<string, number>;
   nodes: string[];
@@ -93,6 +93,9 @@ export function secondSigma(part: Part): number {
   }
 }
 
+/** Name of the line's source resistance and of the node behind it; no reference can be like it. */
+export const LINE_OHMS = '(line)';
+
 /**
  * Turns a checked netlist into integers and lists what is uncertain about it.
  *
@@ -101,6 +104,12 @@ export function secondSigma(part: Part): number {
  */
 export function compileCircuit(netlist: Netlist, lineVolts?: number): Circuit {
   const parts = netlist.parts.map(withDefaults);
+  const { line } = netlist;
+  const hasSourceOhms = line?.ohms !== undefined && line.ohms > 0;
+  if (hasSourceOhms) {
+    // The source resistance is a part nobody can suspect, behind a node nobody can reach.
+    parts.push({ ref: LINE_OHMS, kind: 'joint', between: [LINE_OHMS, line.hot], ohms: line.ohms });
+  }
   const nodes: string[] = [];
   const nodeIndex = new Map<string, number>();
   const indexOf = (node: string): number => {
@@ -112,8 +121,7 @@ export function compileCircuit(netlist: Netlist, lineVolts?: number): Circuit {
     return index;
   };
   const reference = indexOf(netlist.reference);
-  const { line } = netlist;
-  const hot = line ? indexOf(line.hot) : -1;
+  const hot = line ? indexOf(hasSourceOhms ? LINE_OHMS : line.hot) : -1;
   const back = line ? indexOf(line.return) : -1;
   const branches: Branch[] = parts.map((part, index) => ({
     a: indexOf(part.between[0]),
@@ -160,7 +168,7 @@ export function compileCircuit(netlist: Netlist, lineVolts?: number): Circuit {
     hertz: line?.hertz ?? 60,
     branches,
     leakOf,
-    isSteady: splitBlocks(parts, branches, nodes.length, hot, back, line?.ohms ?? 0),
+    isSteady: splitBlocks(parts, branches, nodes.length, hot, back),
     parameters,
     valueParameter,
     secondParameter,

@@ -1,7 +1,7 @@
 import type { OperatingPoint } from '../diagnosis-types';
 import { applyFaults, type SettledFault } from '../faults/apply';
 import { type BranchValues, healthyValues } from './branch-values';
-import type { Circuit } from './circuit';
+import { type Circuit, LINE_OHMS } from './circuit';
 import { RmsNetwork } from './rms-network';
 import { WaveNetwork } from './wave-network';
 
@@ -24,10 +24,10 @@ export function operatingPoint(
   if (!rms.solve(values)) return out;
   const black = rms.volts[circuit.reference];
   circuit.nodes.forEach((node, index) => {
-    if (rms.covers(index) && circuit.hot >= 0)
+    if (rms.covers(index) && circuit.hot >= 0 && node !== LINE_OHMS)
       out.nodes[node] = { acVolts: Math.abs(rms.volts[index] - black) };
   });
-  circuit.parts.forEach(({ ref }, k) => {
+  circuit.netlist.parts.forEach(({ ref }, k) => {
     if (!circuit.isSteady[k]) return;
     const { a, b } = circuit.branches[k];
     const volts = Math.abs(rms.volts[a] - rms.volts[b]);

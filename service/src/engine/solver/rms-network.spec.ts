@@ -102,6 +102,19 @@ describe('published worked examples', () => {
   });
 });
 
+describe('a line with a source resistance', () => {
+  it('loses its share on the way in (100 V behind 10 Ω into 90 Ω: 90 V at 1 A, Ohm’s law)', () => {
+    const netlist = circuitOf(100, [resistor('R1', 'L', 'N', 90)], {
+      line: { hot: 'L', return: 'N', volts: 100, hertz: 60, ohms: 10 },
+    });
+    const { nodes, parts } = solve({ netlist });
+    expect(nodes.L.acVolts).toBeCloseTo(90, 6);
+    expect(parts.R1.amps).toBeCloseTo(1, 8);
+    expect(Object.keys(parts)).toEqual(['R1']);
+    expect(Object.keys(nodes).sort()).toEqual(['L', 'N']);
+  });
+});
+
 describe('heater strings', () => {
   it('runs every heater at its rating when the ratings add up to the line (tube manual ratings)', () => {
     // 35 + 50 + 3 × 12.6 V at 150 mA: 122.8 V, the common five-tube string.
