@@ -7,7 +7,7 @@ export default defineConfig({
     include: ['e2e/**/*.e2e.ts'],
     // Each file starts a shop and a browser of its own; two at once starve each other on a small machine.
     fileParallelism: false,
-    testTimeout: 120_000,
+    testTimeout: 300_000,
     hookTimeout: 120_000,
   },
 });
