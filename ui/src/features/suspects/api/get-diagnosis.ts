@@ -61,7 +61,8 @@ export function useDiagnosis(
   const settled = useSettled(revision, DIAGNOSIS_REST_MS);
   const query = useQuery({
     ...diagnosisQuery(caseId, settled),
-    enabled: (readings?.length ?? 0) > 0,
+    // Only the state that has come to rest is asked about, never one that is already past.
+    enabled: (readings?.length ?? 0) > 0 && settled === revision,
   });
   return { ...query, isCatchingUp: query.isPlaceholderData || settled !== revision };
 }

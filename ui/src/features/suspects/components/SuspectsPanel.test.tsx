@@ -97,6 +97,13 @@ describe('SuspectsPanel', () => {
     await vi.waitFor(() => expect(post).toHaveBeenCalledTimes(2));
   });
 
+  it('asks once for readings that arrive after it', async () => {
+    const { rerender } = renderPanel(panel({ readings: [] }));
+    rerender(panel());
+    await screen.findByRole('article', { name: 'R1B open' });
+    expect(post).toHaveBeenCalledOnce();
+  });
+
   it('says what is wrong with a way on when the service fails', async () => {
     post.mockRejectedValue(new Error('offline'));
     renderPanel(panel());
