@@ -1,9 +1,9 @@
 import { FluentProvider, makeStyles } from '@fluentui/react-components';
 import { type QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { type ReactNode, useEffect } from 'react';
-import { onSignedOut } from '@/lib/access-token';
-import { sessionQuery } from '@/lib/session';
+import { onSessionEnd } from '@/lib/access-token';
 import { lampTheme, paperTheme } from '@/theme/themes';
+import { useSignInAgain } from './sign-in-again';
 import { useIsDark } from './theme-choice';
 
 const useStyles = makeStyles({
@@ -22,9 +22,9 @@ export function AppProviders({ queryClient, children }: AppProvidersProps) {
   const theme = isDark ? lampTheme : paperTheme;
 
   useEffect(() => {
-    onSignedOut(() => queryClient.setQueryData(sessionQuery().queryKey, null));
-    return () => onSignedOut(() => {});
-  }, [queryClient]);
+    onSessionEnd(useSignInAgain.getState().ask);
+    return () => onSessionEnd(() => Promise.resolve(false));
+  }, []);
 
   // Overscroll and the area behind dialogs show the body, which lies outside the provider.
   useEffect(() => {

@@ -1,6 +1,7 @@
 // In memory only: a script that reads storage finds no token, and closing the page forgets it.
 let token: string | null = null;
-let handleSignedOut: () => void = () => {};
+let hasEnded = false;
+let askAgain: () => Promise<boolean> = () => Promise.resolve(false);
 
 /** The access token of the person who is signed in, or null. */
 export function accessToken(): string | null {
@@ -10,15 +11,26 @@ export function accessToken(): string | null {
 /** Keeps the access token until the page is left; null forgets it. */
 export function keepAccessToken(next: string | null): void {
   token = next;
+  hasEnded = false;
 }
 
-/** Registers what happens once a session has ended for good; replaces the former handler. */
-export function onSignedOut(handler: () => void): void {
-  handleSignedOut = handler;
+/** True from the moment a session ended by itself until somebody signs in or leaves. */
+export function hasSessionEnded(): boolean {
+  return hasEnded;
 }
 
-/** Forgets the token and tells the registered handler. */
-export function endSession(): void {
+/** Registers who asks the person to sign in again; it answers whether they did. Replaces the former one. */
+export function onSessionEnd(ask: () => Promise<boolean>): void {
+  askAgain = ask;
+}
+
+/**
+ * Forgets the token and asks the person to sign in again.
+ *
+ * @returns true when the same person is back, so that what waited may go on.
+ */
+export function endSession(): Promise<boolean> {
   token = null;
-  handleSignedOut();
+  hasEnded = true;
+  return askAgain();
 }

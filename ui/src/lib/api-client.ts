@@ -1,7 +1,7 @@
 import axios, { type AxiosError, type InternalAxiosRequestConfig, isAxiosError } from 'axios';
-import { accessToken, endSession, keepAccessToken } from './access-token';
+import { accessToken, endSession, hasSessionEnded, keepAccessToken } from './access-token';
 import { type SignedIn } from './api-model';
-import { toApiProblem } from './api-problem';
+import { hasStatus, toApiProblem } from './api-problem';
 
 interface RetriedConfig extends InternalAxiosRequestConfig {
   /** Set once the request was sent again with a fresh token. */
@@ -45,9 +45,10 @@ apiClient.interceptors.response.use(undefined, async (error: unknown) => {
   try {
     await refreshSession();
   } catch (failure) {
-    // A network that is down ends no session; only the service's refusal does.
-    if (!isAxiosError(failure)) endSession();
-    throw toApiProblem(error);
+    // A network or a service that is down ends no session; only a refusal does.
+    const isOver = hasStatus(failure, 401) || hasStatus(failure, 403);
+    // The request waits until the person has signed in again: what they typed goes on from there.
+    if (!isOver || !(await endSession())) throw toApiProblem(error);
   }
   return apiClient.request(config);
 });
@@ -55,5 +56,10 @@ apiClient.interceptors.response.use(undefined, async (error: unknown) => {
 function isExpired(error: unknown): error is AxiosError {
   if (!isAxiosError(error) || error.response?.status !== 401) return false;
   const config = error.config as RetriedConfig | undefined;
-  return !!config && !config.isRetried && !config.url?.startsWith('/auth/') && !!accessToken();
+  return !!config && !config.isRetried && !config.url?.startsWith('/auth/') && isInside();
+}
+
+/** True while a refusal means that a session ran out, not that there never was one. */
+function isInside(): boolean {
+  return accessToken() !== null || hasSessionEnded();
 }

@@ -48,6 +48,12 @@ export function useSessionActions() {
     remember(true);
     client.setQueryData(sessionQuery().queryKey, signedIn.person);
   };
+  /** The person who was here signs in anew; what the screens hold stays. */
+  const comeBack = (signedIn: SignedIn) => {
+    keepAccessToken(signedIn.accessToken);
+    remember(true);
+    client.setQueryData(sessionQuery().queryKey, signedIn.person);
+  };
   const leave = async () => {
     // Signing out must also work while the service is away: the token is forgotten either way.
     await apiClient.post('/auth/sign-out').catch(() => undefined);
@@ -56,5 +62,5 @@ export function useSessionActions() {
     client.setQueryData(sessionQuery().queryKey, null);
     client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'session' });
   };
-  return { enter, leave };
+  return { enter, comeBack, leave };
 }

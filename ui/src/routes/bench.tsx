@@ -45,7 +45,7 @@ export function Component() {
       <CaseFilters filter={filter} onChange={(_event, next) => setFilter(next)} />
       {cases.isPending ? (
         <LoadingState label="Fetching the cases" />
-      ) : cases.isError ? (
+      ) : cases.isLoadingError ? (
         <FailedState error={cases.error} onRetry={() => void cases.refetch()} />
       ) : cases.data.length === 0 ? (
         <EmptyState

@@ -32,7 +32,7 @@ export function Component() {
   const [part, setPart] = useState<string>();
   const [goTo, setGoTo] = useState<Place>();
   if (found.isPending) return <LoadingState label="Fetching the case" />;
-  if (found.isError)
+  if (found.isLoadingError)
     return <FailedState error={found.error} onRetry={() => void found.refetch()} />;
 
   const repair = found.data;

@@ -37,7 +37,7 @@ export function Component() {
       </Field>
       {families.isPending ? (
         <LoadingState label="Fetching the families" />
-      ) : families.isError ? (
+      ) : families.isLoadingError ? (
         <FailedState error={families.error} onRetry={() => void families.refetch()} />
       ) : families.data.length > 0 ? (
         <FamilyCards families={families.data} linkTo={paths.family} />

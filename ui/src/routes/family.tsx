@@ -25,7 +25,7 @@ export function Component() {
   const { familyId = '' } = useParams();
   const family = useFamily(familyId);
   if (family.isPending) return <LoadingState label="Fetching the family" />;
-  if (family.isError)
+  if (family.isLoadingError)
     return <FailedState error={family.error} onRetry={() => void family.refetch()} />;
   return (
     <>

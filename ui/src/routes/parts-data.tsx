@@ -88,7 +88,7 @@ export function Component() {
       </div>
       {page.isPending ? (
         <LoadingState label="Fetching the ratings" />
-      ) : page.isError ? (
+      ) : page.isLoadingError ? (
         <FailedState error={page.error} onRetry={() => void page.refetch()} />
       ) : page.data.items.length === 0 ? (
         <EmptyState title="No such type is listed.">

@@ -52,7 +52,7 @@ function People({ ownId }: { ownId: number }) {
       <FormMessage message={change.isError ? problemInWords(change.error) : undefined} />
       {people.isPending ? (
         <LoadingState label="Fetching the people" />
-      ) : people.isError ? (
+      ) : people.isLoadingError ? (
         <FailedState error={people.error} onRetry={() => void people.refetch()} />
       ) : people.data.length === 0 ? (
         <EmptyState title="Nobody works here yet.">Invite the first person.</EmptyState>

@@ -30,7 +30,7 @@ export function Component() {
       </Link>
       {rule.isPending ? (
         <LoadingState label="Fetching the rule" />
-      ) : rule.isError ? (
+      ) : rule.isLoadingError ? (
         <FailedState error={rule.error} onRetry={() => void rule.refetch()} />
       ) : (
         <>

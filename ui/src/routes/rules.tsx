@@ -44,7 +44,7 @@ export function Component() {
       />
       {rules.isPending ? (
         <LoadingState label="Fetching the rules" />
-      ) : rules.isError ? (
+      ) : rules.isLoadingError ? (
         <FailedState error={rules.error} onRetry={() => void rules.refetch()} />
       ) : (
         <>

@@ -10,7 +10,7 @@ import { keepAccessToken } from '@/lib/access-token';
  * Renders the whole product at an address, with the service played by `fakeService`.
  *
  * @param path address to open.
- * @returns the testing library's result, a user to act with and the router.
+ * @returns the testing library's result, a user to act with, the router and the cache.
  */
 export function renderApp(path = '/') {
   keepAccessToken(null);
@@ -18,10 +18,11 @@ export function renderApp(path = '/') {
   localStorage.setItem('ohmstead-was-here', '1');
   const router = createMemoryRouter(routes, { initialEntries: [path] });
   const user = userEvent.setup();
+  const queryClient = makeQueryClient(0);
   const view = render(
-    <AppProviders queryClient={makeQueryClient(0)}>
+    <AppProviders queryClient={queryClient}>
       <RouterProvider router={router} />
     </AppProviders>,
   );
-  return { ...view, user, router };
+  return { ...view, user, router, queryClient };
 }
