@@ -29,9 +29,9 @@ export interface SearchLimits {
 }
 
 export const SEARCH_LIMITS: SearchLimits = {
-  extended: 8,
-  refined: 8,
-  pairs: 30,
+  extended: 6,
+  refined: 5,
+  pairs: 20,
   exact: 20,
   most: 6,
   members: 8,
@@ -190,7 +190,7 @@ export class Search {
     this.isExtended.add(set.key);
     const candidates = this.roughCandidates(set)
       .sort((x, y) => y.estimate - x.estimate)
-      .slice(0, 2 * this.limits.refined)
+      .slice(0, this.limits.refined + 4)
       .map((candidate) => this.valuedAnew(set, candidate))
       .sort((x, y) => y.estimate - x.estimate);
     const best = this.best();
